@@ -21,7 +21,6 @@ export default defineConfig({
           ...plain,
           name: "browser",
           include: ["test/e2e/**/*.test.ts"],
-          globalSetup: ["test/support/server.ts"],
           testTimeout: 120_000,
           hookTimeout: 120_000,
           fileParallelism: false,

@@ -12,6 +12,7 @@ import { fitHistory, hashHistory } from "./fit-history.server";
 import { recordHistory } from "./history.server";
 import { conflict, invalid, notFound } from "./refusal";
 import type { Scope } from "./scope";
+import { findShopRules } from "./shop.server";
 
 /** What the crew chief decided on a proposal. */
 export interface SignOff {
@@ -230,11 +231,7 @@ async function workOut(
 
 /** The shop's rules for one of its fits, as the next step takes them. */
 export async function rulesFor(scope: Scope, fit: Pick<Fit, "usual_pm">): Promise<Rules> {
-  const shop = await database()
-    .selectFrom("shop")
-    .select(["largest_step_pm", "least_hours", "stop_grade", "baseline_runs", "wear_rate_rise"])
-    .where("id", "=", scope.shopId)
-    .executeTakeFirstOrThrow();
+  const shop = await findShopRules(scope);
   return {
     usual: metres(fit.usual_pm),
     largestStep: metres(shop.largest_step_pm),

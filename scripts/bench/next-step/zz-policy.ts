@@ -1,7 +1,7 @@
 import { believe, type Sign } from "../../../app/engineering/next-step/posterior";
 import { lookAhead } from "../../../app/engineering/next-step/look-ahead";
 import type { Policy } from "./season";
-export const opts = { maxFail: 0.004, maxDist: 0.12, weight: 0.8, trace: false };
+export const opts = { maxFail: 0.01, maxDist: 0.15, weight: 0.8, trace: false };
 const um = 1e6;
 export const proto: Policy = (shop, its) => {
   const last = its.at(-1);

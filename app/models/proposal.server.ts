@@ -6,7 +6,7 @@ import { nextStep } from "~/engineering/next-step/next-step";
 import type { History, NextStep, Rules } from "~/engineering/next-step/types";
 import { metres, picometres } from "~/engineering/quantity/length";
 import type { Quantity } from "~/engineering/quantity/parse";
-import { listBuilds } from "./build.server";
+import { type Build, listBuilds } from "./build.server";
 import type { Fit } from "./fit.server";
 import { fitHistory, hashHistory } from "./fit-history.server";
 import { recordHistory } from "./history.server";
@@ -38,21 +38,25 @@ export interface StoredProposal {
   signOff: SignOff | undefined;
 }
 
+/** Which build a proposal is for. */
+type BuildOfProposal = Pick<Build, "id" | "number">;
+
 /**
- * The proposal for a fit after its engine's latest teardown. The first call works it out and stores it with its
+ * The proposal for a fit after the teardown of a build. The first call works it out and stores it with its
  * evidence; later ones give the stored one, and say whether the evidence has changed since.
- * @throws Refusal `not-found` where no build of the engine was torn down yet
  */
-export async function proposalFor(scope: Scope, fit: Fit): Promise<StoredProposal> {
-  const build = await latestTornDown(scope, fit.engine_id);
+export async function proposalFor(scope: Scope, fit: Fit, build: BuildOfProposal): Promise<StoredProposal> {
   const history = await fitHistory(scope, fit, build.number);
   const stored = await findStored(scope, fit, build, history);
   return stored ?? workOut(scope, fit, build, history);
 }
 
 /** Works the proposal out again from the evidence as it stands. @throws Refusal `conflict` where it is signed */
-export async function recomputeProposal(scope: Scope, fit: Fit): Promise<StoredProposal> {
-  const build = await latestTornDown(scope, fit.engine_id);
+export async function recomputeProposal(
+  scope: Scope,
+  fit: Fit,
+  build: BuildOfProposal,
+): Promise<StoredProposal> {
   const history = await fitHistory(scope, fit, build.number);
   const stored = await findStored(scope, fit, build, history);
   if (stored?.signOff) throw signedAlready(stored.signOff);
@@ -75,8 +79,13 @@ export interface NewSignOff {
  * @throws Refusal `conflict` where it is signed, stale, or not the version the person saw; `invalid` where the target
  * leaves the hard limits or a reason is missing
  */
-export async function signProposal(scope: Scope, fit: Fit, signOff: NewSignOff): Promise<SignOff> {
-  const proposal = await proposalFor(scope, fit);
+export async function signProposal(
+  scope: Scope,
+  fit: Fit,
+  build: BuildOfProposal,
+  signOff: NewSignOff,
+): Promise<SignOff> {
+  const proposal = await proposalFor(scope, fit, build);
   if (proposal.signOff) throw signedAlready(proposal.signOff);
   if (proposal.version !== signOff.version) {
     throw conflict(
@@ -163,7 +172,8 @@ function signedAlready(signOff: SignOff) {
   return conflict("already-signed", `${signOff.personName} has signed this already (${signOff.decision}).`);
 }
 
-async function latestTornDown(scope: Scope, engineId: string) {
+/** The latest build of an engine that a next step can follow from. @throws Refusal `not-found` */
+export async function latestTornDown(scope: Scope, engineId: string) {
   const build = (await listBuilds(scope, engineId)).find(
     (candidate) => candidate.state === "torn-down" || candidate.state === "reviewed",
   );
@@ -174,7 +184,7 @@ async function latestTornDown(scope: Scope, engineId: string) {
 async function findStored(
   scope: Scope,
   fit: Fit,
-  build: { id: string; number: number },
+  build: BuildOfProposal,
   history: History,
 ): Promise<StoredProposal | undefined> {
   const rows = await database()
@@ -204,7 +214,7 @@ async function findStored(
 async function workOut(
   scope: Scope,
   fit: Fit,
-  build: { id: string; number: number },
+  build: BuildOfProposal,
   history: History,
 ): Promise<StoredProposal> {
   const answer = nextStep(history, await rulesFor(scope, fit));

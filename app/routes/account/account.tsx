@@ -81,7 +81,10 @@ export default function Account({ loaderData: account, actionData }: Route.Compo
   const errors = actionData && "errors" in actionData ? actionData.errors : [];
   const token = actionData && "token" in actionData ? actionData.token : undefined;
   return (
-    <Page title="Your account" subtitle={`${account.name} · ${account.role} at ${account.shopName} · ${account.email}`}>
+    <Page
+      title="Your account"
+      subtitle={`${account.name} · ${account.role} at ${account.shopName} · ${account.email}`}
+    >
       <ErrorSummary errors={errors} />
       <div className="grid max-w-3xl gap-9">
         <Form method="post" className="grid gap-3">
@@ -104,7 +107,9 @@ export default function Account({ loaderData: account, actionData }: Route.Compo
         {account.mayMakeTokens && (
           <section>
             <h2 className="mb-2 text-lg font-semibold">Tokens for the API</h2>
-            <p className="mb-4 text-mute">A token does what you may do in this shop. Give each gauge or script its own.</p>
+            <p className="mb-4 text-mute">
+              A token does what you may do in this shop. Give each gauge or script its own.
+            </p>
             {token && (
               <Notice tone="ok" title="Copy the token now; it is not shown again.">
                 <code className="select-all break-all font-mono">{token}</code>

@@ -6,6 +6,7 @@ import { Button, ButtonLink } from "~/components/ui/button";
 import { ErrorSummary } from "~/components/ui/error-summary";
 import { Page } from "~/components/ui/page";
 import { Table } from "~/components/ui/table";
+import { clearanceText, clearanceUnit, dayText } from "~/engineering/quantity/figures";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findBuild, listTargets } from "~/models/build.server";
 import { listFits } from "~/models/fit.server";
@@ -15,7 +16,6 @@ import { listSignatures, takeBuildFurther } from "~/models/sheet.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { stateWords } from "~/routes/engines/words";
 import { fieldErrors, fieldsOf } from "~/routes/form-fields";
-import { clearanceText, clearanceUnit, dayText } from "~/engineering/quantity/figures";
 import type { Route } from "./+types/build";
 import { BuildTabs } from "./build-tabs";
 
@@ -45,7 +45,11 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     note: build.note,
     hours: runs.reduce((sum, run) => sum + run.hours, 0).toFixed(1),
     runs: runs.length,
-    signatures: signatures.map(({ stage, personName, signedAt }) => ({ stage, personName, day: dayText(signedAt) })),
+    signatures: signatures.map(({ stage, personName, signedAt }) => ({
+      stage,
+      personName,
+      day: dayText(signedAt),
+    })),
     unit: clearanceUnit(person.units),
     fits: fits.map((fit) => {
       const target = targets.find((row) => row.fitId === fit.id);
@@ -87,7 +91,9 @@ export default function Build({ loaderData: build, actionData }: Route.Component
   return (
     <Page
       title={build.title}
-      subtitle={[build.stands, `${build.hours} h in ${build.runs} runs`, build.oil].filter(Boolean).join(" · ")}
+      subtitle={[build.stands, `${build.hours} h in ${build.runs} runs`, build.oil]
+        .filter(Boolean)
+        .join(" · ")}
       breadcrumbs={[
         { to: href("/engines"), label: "Engines" },
         { to: href("/engines/:engineId", { engineId: build.engineId }), label: build.engineName },
@@ -112,7 +118,9 @@ export default function Build({ loaderData: build, actionData }: Route.Component
           {build.fits.map((fit) => (
             <tr key={fit.id}>
               <th scope="row">
-                <Link to={href("/engines/:engineId/fits/:fitId", { engineId: build.engineId, fitId: fit.id })}>
+                <Link
+                  to={href("/engines/:engineId/fits/:fitId", { engineId: build.engineId, fitId: fit.id })}
+                >
                   {fit.name}
                 </Link>
               </th>
@@ -140,8 +148,8 @@ export default function Build({ loaderData: build, actionData }: Route.Component
         <ul className="mt-5">
           {build.signatures.map((signature) => (
             <li key={signature.stage}>
-              {signature.stage === "assembly" ? "Assembly sheet" : "Teardown sheet"} signed by {signature.personName},{" "}
-              {signature.day}.
+              {signature.stage === "assembly" ? "Assembly sheet" : "Teardown sheet"} signed by{" "}
+              {signature.personName}, {signature.day}.
             </li>
           ))}
         </ul>
@@ -151,8 +159,8 @@ export default function Build({ loaderData: build, actionData }: Route.Component
           <input type="hidden" name="to" value="torn-down" />
           <input type="hidden" name="version" value={build.version} />
           <p className="mb-3 max-w-prose text-mute">
-            Before it is opened: leak-down while warm, an oil sample, the filter, lash as found. Oil and parts are hot;
-            springs are loaded.
+            Before it is opened: leak-down while warm, an oil sample, the filter, lash as found. Oil and parts
+            are hot; springs are loaded.
           </p>
           <Button type="submit">Tear it down</Button>
         </Form>

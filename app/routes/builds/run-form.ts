@@ -1,6 +1,6 @@
 import { z } from "zod";
-import { runEvents, runKinds } from "~/engineering/trade/condition";
 import type { PageUnits } from "~/engineering/quantity/figures";
+import { runEvents, runKinds } from "~/engineering/trade/condition";
 import { note, numberBetween, optionalNumber, optionalQuantity, text } from "~/routes/form-fields";
 
 const day = z
@@ -12,7 +12,10 @@ const day = z
     if (Number.isNaN(date.getTime())) context.addIssue({ code: "custom", message: "There is no such day." });
     // A day's grace: the shop's clock and the server's may stand in different time zones.
     else if (date.getTime() > Date.now() + 24 * 60 * 60 * 1000) {
-      context.addIssue({ code: "custom", message: "This day is in the future; a run is logged when it has been run." });
+      context.addIssue({
+        code: "custom",
+        message: "This day is in the future; a run is logged when it has been run.",
+      });
     }
     return date;
   });
@@ -25,19 +28,19 @@ const temperature = optionalQuantity("temperature", "degC").refine(
 /** What the run log takes; the server and the page check by the same rules. */
 export const runForm = (units: PageUnits) =>
   z.object({
-  kind: z.enum(runKinds, { error: "Say what kind of run it was." }),
-  startedAt: day,
-  hours: numberBetween(0, 1000, "Hours are a number from 0 to 1000."),
-  laps: optionalNumber(0, 100_000, "Laps are a number from 0 up."),
-  starts: optionalNumber(0, 10_000, "Starts are a number from 0 up."),
-  topSpeedRpm: optionalNumber(100, 30_000, "The top speed of the crank is between 100 and 30 000 rpm."),
-  oilId: text("Choose the oil it ran on."),
-  oilTemperature: temperature,
-  pressureIdle: optionalQuantity("pressure", units === "inch" ? "psi" : "bar"),
-  pressureAtSpeed: optionalQuantity("pressure", units === "inch" ? "psi" : "bar"),
-  pressureAtSpeedRpm: optionalNumber(100, 30_000, "The speed of the crank is between 100 and 30 000 rpm."),
-  events: z
-    .union([z.enum(runEvents).transform((event) => [event]), z.array(z.enum(runEvents))])
-    .default([]),
-  note: note(),
-});
+    kind: z.enum(runKinds, { error: "Say what kind of run it was." }),
+    startedAt: day,
+    hours: numberBetween(0, 1000, "Hours are a number from 0 to 1000."),
+    laps: optionalNumber(0, 100_000, "Laps are a number from 0 up."),
+    starts: optionalNumber(0, 10_000, "Starts are a number from 0 up."),
+    topSpeedRpm: optionalNumber(100, 30_000, "The top speed of the crank is between 100 and 30 000 rpm."),
+    oilId: text("Choose the oil it ran on."),
+    oilTemperature: temperature,
+    pressureIdle: optionalQuantity("pressure", units === "inch" ? "psi" : "bar"),
+    pressureAtSpeed: optionalQuantity("pressure", units === "inch" ? "psi" : "bar"),
+    pressureAtSpeedRpm: optionalNumber(100, 30_000, "The speed of the crank is between 100 and 30 000 rpm."),
+    events: z
+      .union([z.enum(runEvents).transform((event) => [event]), z.array(z.enum(runEvents))])
+      .default([]),
+    note: note(),
+  });

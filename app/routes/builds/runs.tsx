@@ -87,7 +87,10 @@ export default function Runs({ loaderData, actionData }: Route.ComponentProps) {
         { to: href("/engines/:engineId", { engineId: loaderData.engineId }), label: loaderData.engineName },
       ]}
     >
-      <BuildTabs buildId={loaderData.id} tornDown={loaderData.state === "torn-down" || loaderData.state === "reviewed"} />
+      <BuildTabs
+        buildId={loaderData.id}
+        tornDown={loaderData.state === "torn-down" || loaderData.state === "reviewed"}
+      />
       {runs.length === 0 ? (
         <EmptyState title="No run is logged yet.">
           <p>
@@ -167,9 +170,17 @@ function LogRun({ loaderData, refused }: LogRunProps) {
         <Field label="Laps" inputMode="numeric" {...field("laps")} />
         <Field label="Starts" inputMode="numeric" {...field("starts")} />
         <Field label="Top speed" suffix="rpm" inputMode="numeric" {...field("topSpeedRpm")} />
-        <Select label="Oil" {...field("oilId", loaderData.oilId)} options={[{ value: "", label: "Choose" }, ...loaderData.oils]} />
+        <Select
+          label="Oil"
+          {...field("oilId", loaderData.oilId)}
+          options={[{ value: "", label: "Choose" }, ...loaderData.oils]}
+        />
         <Field label="Oil temperature" hint="°C, or 221 degF" {...field("oilTemperature")} />
-        <Field label="Pressure, hot idle" hint={`${loaderData.pressureUnit}, or with its unit`} {...field("pressureIdle")} />
+        <Field
+          label="Pressure, hot idle"
+          hint={`${loaderData.pressureUnit}, or with its unit`}
+          {...field("pressureIdle")}
+        />
         <Field label="Pressure at speed" hint="Lowest under load" {...field("pressureAtSpeed")} />
         <Field label="At" suffix="rpm" inputMode="numeric" {...field("pressureAtSpeedRpm")} />
       </div>

@@ -41,8 +41,8 @@ export default function Gauges({ loaderData: { gauges, mayAdd } }: Route.Compone
       {gauges.length === 0 ? (
         <EmptyState title="No gauge is known yet.">
           <p>
-            A gauge's resolution, calibration and repeats say how sure a clearance is; without them a reading only gets
-            what its digits allow.
+            A gauge's resolution, calibration and repeats say how sure a clearance is; without them a reading
+            only gets what its digits allow.
           </p>
           {add}
         </EmptyState>

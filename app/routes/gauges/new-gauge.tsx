@@ -13,7 +13,13 @@ import type { Route } from "./+types/new-gauge";
 
 export const meta: Route.MetaFunction = () => [{ title: "Add a gauge · Tenthbook" }];
 
-const gaugeKinds = ["micrometer", "bore gauge", "ball-anvil micrometer", "small-hole gauge", "other"] as const;
+const gaugeKinds = [
+  "micrometer",
+  "bore gauge",
+  "ball-anvil micrometer",
+  "small-hole gauge",
+  "other",
+] as const;
 
 const gaugeForm = z.object({
   name: text("Give the gauge a name."),
@@ -22,7 +28,9 @@ const gaugeForm = z.object({
   resolution: quantity("small-length", "in"),
   calibration: quantity("small-length", "in"),
   repeatability: quantity("small-length", "in"),
-  dueOn: z.union([z.literal("").transform(() => undefined), z.iso.date("Type the day as year-month-day.")]).optional(),
+  dueOn: z
+    .union([z.literal("").transform(() => undefined), z.iso.date("Type the day as year-month-day.")])
+    .optional(),
 });
 
 export function loader({ request, context }: Route.LoaderArgs) {
@@ -53,11 +61,23 @@ export default function NewGauge({ actionData }: Route.ComponentProps) {
       <ErrorSummary errors={errors} />
       <Form method="post" noValidate className="grid max-w-xl gap-5">
         <Field label="Name" {...field("name")} />
-        <Select label="Kind" {...field("kind", "micrometer")} options={gaugeKinds.map((kind) => ({ value: kind, label: kind }))} />
+        <Select
+          label="Kind"
+          {...field("kind", "micrometer")}
+          options={gaugeKinds.map((kind) => ({ value: kind, label: kind }))}
+        />
         <Field label="Serial number" {...field("serial")} />
         <Field label="Resolution" hint="The step it shows: 0.0001 in, 1 µm" {...field("resolution")} />
-        <Field label="Calibration" hint="Standard uncertainty from its certificate: half of what it gives at 95 %" {...field("calibration")} />
-        <Field label="Repeatability" hint="Standard deviation of repeats by the same hand" {...field("repeatability")} />
+        <Field
+          label="Calibration"
+          hint="Standard uncertainty from its certificate: half of what it gives at 95 %"
+          {...field("calibration")}
+        />
+        <Field
+          label="Repeatability"
+          hint="Standard deviation of repeats by the same hand"
+          {...field("repeatability")}
+        />
         <Field label="Calibration due" hint="Year-month-day" {...field("dueOn")} />
         <div>
           <Button type="submit" variant="primary">

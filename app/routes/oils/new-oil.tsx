@@ -7,7 +7,15 @@ import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { insertOil } from "~/models/oil.server";
 import { orFormErrors, refuseForm } from "~/routes/answer.server";
-import { fieldErrors, fieldsOf, note, optionalNumber, optionalQuantity, quantity, text } from "~/routes/form-fields";
+import {
+  fieldErrors,
+  fieldsOf,
+  note,
+  optionalNumber,
+  optionalQuantity,
+  quantity,
+  text,
+} from "~/routes/form-fields";
 import type { Route } from "./+types/new-oil";
 
 export const meta: Route.MetaFunction = () => [{ title: "Add an oil · Tenthbook" }];

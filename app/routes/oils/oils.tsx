@@ -39,7 +39,10 @@ export default function Oils({ loaderData: { oils, mayAdd } }: Route.ComponentPr
     <Page title="Oils" actions={oils.length > 0 && add}>
       {oils.length === 0 ? (
         <EmptyState title="No oil is known yet.">
-          <p>An oil's data sheet gives its viscosity at 40 and 100 °C; the rest of its curve follows from those two.</p>
+          <p>
+            An oil's data sheet gives its viscosity at 40 and 100 °C; the rest of its curve follows from those
+            two.
+          </p>
           {add}
         </EmptyState>
       ) : (

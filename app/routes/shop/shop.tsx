@@ -91,11 +91,32 @@ export default function Shop({ loaderData: { shopName, people, rules }, actionDa
         <h2 className="text-lg font-semibold">Rules of the next step</h2>
         <ErrorSummary errors={errors} />
         <input type="hidden" name="version" value={rules.version} />
-        <Field label="Largest step" hint="By how much one build may close a fit" {...field("largestStep", rules.largestStep)} />
-        <Field label="Least hours" suffix="h" hint="A build that ran less is not judged" {...field("leastHours", rules.least_hours)} />
-        <Field label="Stop grade" hint="A grade of this or worse, where the clearance did it, opens the fit" {...field("stopGrade", rules.stop_grade)} />
-        <Field label="Baseline builds" hint="Clean builds at the usual clearance before a new coating is stepped" {...field("baselineRuns", rules.baseline_runs)} />
-        <Field label="Wear rate rise" hint="Times the engine's own baseline that opens the fit" {...field("wearRateRise", rules.wear_rate_rise)} />
+        <Field
+          label="Largest step"
+          hint="By how much one build may close a fit"
+          {...field("largestStep", rules.largestStep)}
+        />
+        <Field
+          label="Least hours"
+          suffix="h"
+          hint="A build that ran less is not judged"
+          {...field("leastHours", rules.least_hours)}
+        />
+        <Field
+          label="Stop grade"
+          hint="A grade of this or worse, where the clearance did it, opens the fit"
+          {...field("stopGrade", rules.stop_grade)}
+        />
+        <Field
+          label="Baseline builds"
+          hint="Clean builds at the usual clearance before a new coating is stepped"
+          {...field("baselineRuns", rules.baseline_runs)}
+        />
+        <Field
+          label="Wear rate rise"
+          hint="Times the engine's own baseline that opens the fit"
+          {...field("wearRateRise", rules.wear_rate_rise)}
+        />
         <div>
           <Button type="submit">Keep these rules</Button>
         </div>

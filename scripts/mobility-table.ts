@@ -3,7 +3,7 @@ import { moesMobility } from "../app/engineering/cycle/moes-mobility";
 import { squeezeFilm } from "../app/engineering/cycle/squeeze-film";
 
 // Makes app/engineering/cycle/mobility-table.generated.ts: what Moes' mobility must be stretched and turned by to
-// agree with the Reynolds equation. Run with `npx tsx scripts/mobility-table.ts`; it takes some minutes.
+// agree with the Reynolds equation. Run with `npx tsx scripts/mobility-table.ts`; it takes a quarter of an hour.
 
 const lengthToDiameters = [0.1, 0.15, 0.2, 0.3, 0.4, 0.5, 0.65, 0.8, 1, 1.25, 1.5];
 const thinnessSteps = 21;
@@ -39,15 +39,18 @@ function row(eccentricity: number, lengthToDiameter: number): number[] {
   const found = pushes
     .map((push) => correctionAt(eccentricity, push, lengthToDiameter))
     .sort((a, b) => a.cosine - b.cosine);
-  return Array.from({ length: cosineSteps }, (_, index) => (2 * index) / (cosineSteps - 1) - 1).flatMap((cosine) => {
-    const after = found.findIndex((each, place) => place > 0 && each.cosine >= cosine);
-    const high = found.at(after)!; // the last one, where the cosine is beyond them all
-    const low = found[found.indexOf(high) - 1]!;
-    const part = Math.max(0, Math.min(1, (cosine - low.cosine) / (high.cosine - low.cosine)));
-    return [low.stretch + part * (high.stretch - low.stretch), low.turn + part * (high.turn - low.turn)].map(
-      (value) => Math.round(1000 * value),
-    );
-  });
+  return Array.from({ length: cosineSteps }, (_, index) => (2 * index) / (cosineSteps - 1) - 1).flatMap(
+    (cosine) => {
+      const after = found.findIndex((each, place) => place > 0 && each.cosine >= cosine);
+      const high = found.at(after)!; // the last one, where the cosine is beyond them all
+      const low = found[found.indexOf(high) - 1]!;
+      const part = Math.max(0, Math.min(1, (cosine - low.cosine) / (high.cosine - low.cosine)));
+      return [
+        low.stretch + part * (high.stretch - low.stretch),
+        low.turn + part * (high.turn - low.turn),
+      ].map((value) => Math.round(1000 * value));
+    },
+  );
 }
 
 const tables = lengthToDiameters.map((lengthToDiameter) => {

@@ -1,7 +1,7 @@
 import { createHash } from "node:crypto";
 import { database } from "#database/connection";
 import type { History, Iteration, OilOfRun, PositionOfBuild } from "~/engineering/next-step/types";
-import { densityAt, dynamicViscosity } from "~/engineering/oil/viscosity";
+import { dynamicViscosity } from "~/engineering/oil/viscosity";
 import { metres } from "~/engineering/quantity/length";
 import type { Fit } from "./fit.server";
 import { listGauges } from "./gauge.server";

@@ -10,7 +10,13 @@ export async function listRungs(scope: Scope, engineId: string) {
       .selectFrom("run")
       .innerJoin("build", "build.id", "run.build_id")
       .innerJoin("oil", "oil.id", "run.oil_id")
-      .select(["run.build_id as buildId", "run.hours", "run.events_json as eventsJson", "oil.grade", "oil.kv100"])
+      .select([
+        "run.build_id as buildId",
+        "run.hours",
+        "run.events_json as eventsJson",
+        "oil.grade",
+        "oil.kv100",
+      ])
       .where("build.engine_id", "=", engineId)
       .where("run.shop_id", "=", scope.shopId)
       .orderBy("run.started_at")

@@ -5,7 +5,13 @@ import { recordHistory } from "./history.server";
 import { conflict } from "./refusal";
 import type { Scope } from "./scope";
 
-const ruleColumns = ["largest_step_pm", "least_hours", "stop_grade", "baseline_runs", "wear_rate_rise"] as const;
+const ruleColumns = [
+  "largest_step_pm",
+  "least_hours",
+  "stop_grade",
+  "baseline_runs",
+  "wear_rate_rise",
+] as const;
 
 /** The shop's rules for the next step. */
 export type ShopRules = Required<Pick<Updateable<ShopTable>, (typeof ruleColumns)[number]>>;
@@ -32,7 +38,10 @@ export async function updateShopRules(scope: Scope, rules: ShopRules, version: n
         .where("version", "=", version)
         .executeTakeFirst();
       if (result.numUpdatedRows === 0n) {
-        throw conflict("lost-update", "Someone changed the rules while you were typing. Look at them again, then save.");
+        throw conflict(
+          "lost-update",
+          "Someone changed the rules while you were typing. Look at them again, then save.",
+        );
       }
       await recordHistory(transaction, scope, {
         subjectKind: "shop",

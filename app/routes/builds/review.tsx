@@ -39,7 +39,12 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
   const isLatest = builds[0]?.id === build.id;
   const reviews = await Promise.all(
     fits.map(async (fit) =>
-      fitReview(fit, await orPage(proposalFor(scope, fit, build)), await listDecisions(scope, fit.id), person.units),
+      fitReview(
+        fit,
+        await orPage(proposalFor(scope, fit, build)),
+        await listDecisions(scope, fit.id),
+        person.units,
+      ),
     ),
   );
   return {
@@ -107,7 +112,9 @@ export default function Review({ loaderData: review, actionData }: Route.Compone
       subtitle={[
         review.stands,
         review.teardownSigned ? undefined : "the teardown sheet is not signed yet",
-        review.open === 0 ? "every fit is signed" : `${review.open} of ${review.reviews.length} fits wait for a signature`,
+        review.open === 0
+          ? "every fit is signed"
+          : `${review.open} of ${review.reviews.length} fits wait for a signature`,
       ]
         .filter(Boolean)
         .join(" · ")}
@@ -145,7 +152,9 @@ export default function Review({ loaderData: review, actionData }: Route.Compone
         </Form>
       )}
       <p className="mt-6">
-        <Link to={href("/engines/:engineId", { engineId: review.engineId })}>Back to {review.engineName}</Link>
+        <Link to={href("/engines/:engineId", { engineId: review.engineId })}>
+          Back to {review.engineName}
+        </Link>
       </p>
     </Page>
   );

@@ -1,7 +1,11 @@
 import type { SheetAnswer } from "~/components/sheet/use-sender";
 
 /** A server that does not answer must not cost what was typed: the sheet keeps it and sends it again. */
-export async function clientAction<T>({ serverAction }: { serverAction: () => Promise<T> }): Promise<T | SheetAnswer> {
+export async function clientAction<T>({
+  serverAction,
+}: {
+  serverAction: () => Promise<T>;
+}): Promise<T | SheetAnswer> {
   try {
     return await serverAction();
   } catch (error) {

@@ -3,6 +3,7 @@ import type { BoxState } from "~/components/sheet/sheet-store";
 import { diameterUnitName, type PageUnits } from "~/engineering/quantity/figures";
 import { formatLength } from "~/engineering/quantity/format";
 import { metres } from "~/engineering/quantity/length";
+import { findMaterial } from "~/engineering/temperature/materials";
 import { absenceText } from "~/engineering/trade/box-text";
 import { fitKind, type Station } from "~/engineering/trade/fit-kinds";
 import type { Target } from "~/models/build.server";
@@ -60,9 +61,14 @@ export function sheetOf(fit: Fit, target: Target | undefined, readings: Standing
     },
     limits: { least: metres(fit.least_pm), most: metres(fit.most_pm) },
     method: fit.method,
-    boreMaterial: fit.bore_material,
-    journalMaterial: fit.journal_material,
+    boreExpansion: expansionOf(fit.bore_material),
+    journalExpansion: expansionOf(fit.journal_material),
   };
+}
+
+function expansionOf(material: string) {
+  const { expansion, uncertainty } = findMaterial(material);
+  return { expansion, uncertainty };
 }
 
 export type Sheet = ReturnType<typeof sheetOf>;

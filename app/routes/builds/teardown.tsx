@@ -68,10 +68,17 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     mayMeasure: open && may(person.role, "reading:write"),
     mayFind: open && may(person.role, "finding:write"),
     maySign: open && may(person.role, "sheet:sign"),
-    sheet: sheetOf(fit, targets.find((target) => target.fitId === fit.id), after),
+    sheet: sheetOf(
+      fit,
+      targets.find((target) => target.fitId === fit.id),
+      after,
+    ),
     boxes: boxStates(after, person.units),
     before: Object.fromEntries(
-      boxStates(readings.filter((row) => row.stage === "assembly"), person.units).map(([key, box]) => [key, box.text]),
+      boxStates(
+        readings.filter((row) => row.stage === "assembly"),
+        person.units,
+      ).map(([key, box]) => [key, box.text]),
     ),
     gauges: may(person.role, "gauge:read") ? (await listGauges(scope)).map(gaugeChoice) : [],
     lastTemperature: after.at(-1)?.temperatureC?.toFixed(1) ?? "",
@@ -112,7 +119,8 @@ const findingForm = z.object({
 export async function action({ request, context, params }: Route.ActionArgs) {
   const form = await request.formData();
   const intent = form.get("intent");
-  const permission = intent === "finding" ? "finding:write" : intent === "sign" ? "sheet:sign" : "reading:write";
+  const permission =
+    intent === "finding" ? "finding:write" : intent === "sign" ? "sheet:sign" : "reading:write";
   const { person, scope } = requirePerson({ request, context }, permission);
   const build = await orPage(findBuild(scope, params.buildId));
   return orFormErrors(form, async () => {
@@ -171,7 +179,12 @@ export default function Teardown({ loaderData, actionData }: Route.ComponentProp
         </p>
         <ul className="divide-y divide-line border-y border-line">
           {loaderData.findings.map((finding) => (
-            <FindingRow key={finding.positionId} finding={finding} loaderData={loaderData} refused={refused} />
+            <FindingRow
+              key={finding.positionId}
+              finding={finding}
+              loaderData={loaderData}
+              refused={refused}
+            />
           ))}
         </ul>
       </section>
@@ -184,7 +197,8 @@ export default function Teardown({ loaderData, actionData }: Route.ComponentProp
         <Form method="post" className="mt-9 grid max-w-xl gap-4 border-t border-line pt-5">
           <h2 className="text-lg font-semibold">Sign the teardown sheet</h2>
           <p className="text-mute">
-            Your signature freezes the readings and findings of every fit, and the build goes to its crew chief.
+            Your signature freezes the readings and findings of every fit, and the build goes to its crew
+            chief.
           </p>
           <input type="hidden" name="intent" value="sign" />
           <div>
@@ -206,7 +220,10 @@ function FindingRow({ finding, loaderData, refused }: FindingRowProps) {
   const { sheet } = loaderData;
   const title = `${sheet.position} ${finding.number}`;
   const isRefused = refused?.values.positionId === finding.positionId;
-  const field = (name: "damage" | "place" | "areaShare" | "cause" | "coatingState" | "note" | "grade", start: string) => ({
+  const field = (
+    name: "damage" | "place" | "areaShare" | "cause" | "coatingState" | "note" | "grade",
+    start: string,
+  ) => ({
     name,
     defaultValue: isRefused ? refused?.values[name] : start,
     error: isRefused ? refused?.errors.find((error) => error.path === name)?.message : undefined,
@@ -239,7 +256,10 @@ function FindingRow({ finding, loaderData, refused }: FindingRowProps) {
               {...field("grade", finding.grade === undefined ? "" : String(finding.grade))}
               options={[
                 { value: "", label: "Choose" },
-                ...conditionGrades.map((word, grade) => ({ value: String(grade), label: `${grade} ${word}` })),
+                ...conditionGrades.map((word, grade) => ({
+                  value: String(grade),
+                  label: `${grade} ${word}`,
+                })),
               ]}
             />
             <Select
@@ -250,8 +270,17 @@ function FindingRow({ finding, loaderData, refused }: FindingRowProps) {
                 ...damageTerms.map((term) => ({ value: term, label: inWords(term) })),
               ]}
             />
-            <Field label="Place" hint="Upper shell, front edge, 5 o'clock" {...field("place", finding.place)} />
-            <Field label="Share of the area" suffix="%" inputMode="decimal" {...field("areaShare", finding.areaShare)} />
+            <Field
+              label="Place"
+              hint="Upper shell, front edge, 5 o'clock"
+              {...field("place", finding.place)}
+            />
+            <Field
+              label="Share of the area"
+              suffix="%"
+              inputMode="decimal"
+              {...field("areaShare", finding.areaShare)}
+            />
             {loaderData.coated && (
               <Select
                 label={`Coating (${inWords(loaderData.coated)})`}

@@ -1,0 +1,82 @@
+import { clearanceText, dayText, type PageUnits } from "~/engineering/quantity/figures";
+import { picometres } from "~/engineering/quantity/length";
+import type { NextStep } from "~/engineering/next-step/types";
+import { fitKind } from "~/engineering/trade/fit-kinds";
+import { wearBars } from "~/engineering/wear/wear-bars";
+import type { Fit } from "~/models/fit.server";
+import type { PastDecision, StoredProposal } from "~/models/proposal.server";
+import { pastDecisions } from "~/routes/engines/past-decisions";
+
+/** A proposal as the review page shows it: its headline, reasons and cautions in the page's units, drawings as numbers. */
+export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDecision[], units: PageUnits) {
+  const { answer, history, signOff } = proposal;
+  const build = history.iterations.at(-1);
+  return {
+    id: fit.id,
+    name: fitKind(fit.kind).name,
+    units,
+    limits: fit.limits_source,
+    version: proposal.version,
+    day: dayText(proposal.proposedAt),
+    stale: proposal.stale,
+    headline: headline(answer, units),
+    reasons: answer.reasons.map((reason) => reason.text),
+    cautions: answer.cautions.map((caution) => caution.text),
+    wouldChange: answer.wouldChange,
+    cannotSee: answer.cannotSee,
+    action: answer.action,
+    confidence: answer.confidence,
+    measured: build?.positions.filter((position) => position.assembled && position.tornDown).length ?? 0,
+    positions: fit.positions.length,
+    uncertainty: clearanceText(picometres(answer.evidence.uncertainty), units),
+    signOff: signOff && {
+      decision: signOff.decision,
+      target: clearanceText(signOff.targetPm, units),
+      reason: signOff.reason,
+      by: signOff.personName,
+      day: dayText(signOff.signedAt),
+    },
+    strip: build && {
+      aim: build.target,
+      limits: history.fit.hardLimits,
+      positions: build.positions.map((position) => ({
+        number: position.position,
+        assembled: position.assembled?.clearance,
+        tornDown: position.tornDown?.clearance,
+      })),
+      likelyLimit: likelyLimit(answer),
+      step: answer.step === 0 ? undefined : { from: answer.target - answer.step, to: answer.target },
+    },
+    wear: build ? wearBars(build) : [],
+    decisions: pastDecisions(decisions, units),
+  };
+}
+
+export type FitReviewData = ReturnType<typeof fitReview>;
+
+/** The narrowest band of the belief that is worth drawing: "7 in 10 that the limit lies here". */
+function likelyLimit(answer: NextStep) {
+  const bands = answer.evidence.posterior?.bands ?? [];
+  return bands.find((band) => band.share >= 0.65 && band.share <= 0.75) ?? bands[0];
+}
+
+const verbs: Record<NextStep["action"], string> = {
+  close: "Close",
+  open: "Open",
+  hold: "Hold",
+  settled: "Settled",
+  "measure-again": "Measure again",
+  "find-cause": "Find the cause first",
+};
+
+/** The proposal in a line: "Close by .00010 to .00210 in". */
+function headline(answer: NextStep, units: PageUnits) {
+  const target = clearanceText(picometres(answer.target), units);
+  const step = clearanceText(picometres(Math.abs(answer.step)), units);
+  return {
+    verb: verbs[answer.action],
+    step: answer.step === 0 ? "" : step,
+    target,
+    oil: answer.subject === "oil",
+  };
+}

@@ -1,0 +1,68 @@
+import { Table } from "~/components/ui/table";
+import { clearanceText, clearanceUnit, dayText, type PageUnits } from "~/engineering/quantity/figures";
+
+interface Decision {
+  number: number;
+  action: string;
+  subject: string;
+  stepPm: number;
+  proposedPm: number;
+  decision: string | null;
+  signedPm: number | null;
+  reason: string | null;
+  signedAt: string | null;
+  personName: string | null;
+}
+
+const decided: Record<string, string> = { accept: "accepted", change: "changed", decline: "declined" };
+
+/** What was proposed and decided at each build, as a page shows it, newest first. */
+export function pastDecisions(decisions: readonly Decision[], units: PageUnits) {
+  return {
+    unit: clearanceUnit(units),
+    rows: decisions
+      .map((row) => ({
+        build: row.number,
+        proposed: `${row.action.replaceAll("-", " ")}${row.subject === "oil" ? ", oil" : ""}`,
+        to: clearanceText(row.proposedPm, units),
+        decision: row.decision ? decided[row.decision]! : "not signed",
+        signed: row.signedPm === null ? "" : clearanceText(row.signedPm, units),
+        by: row.personName ? `${row.personName}, ${dayText(row.signedAt!)}` : "",
+        reason: row.reason ?? "",
+      }))
+      .reverse(),
+  };
+}
+
+/** The table of them. */
+export function PastDecisions({ decisions }: { decisions: ReturnType<typeof pastDecisions> }) {
+  if (decisions.rows.length === 0) return null;
+  return (
+    <Table caption="What was proposed and what was signed">
+      <thead>
+        <tr>
+          <th scope="col">build</th>
+          <th scope="col">proposed</th>
+          <th scope="col">to, {decisions.unit}</th>
+          <th scope="col">decision</th>
+          <th scope="col">signed, {decisions.unit}</th>
+          <th scope="col">by</th>
+          <th scope="col">reason</th>
+        </tr>
+      </thead>
+      <tbody>
+        {decisions.rows.map((row) => (
+          <tr key={row.build}>
+            <th scope="row">Build {row.build}</th>
+            <td>{row.proposed}</td>
+            <td>{row.to}</td>
+            <td>{row.decision}</td>
+            <td>{row.signed}</td>
+            <td>{row.by}</td>
+            <td>{row.reason}</td>
+          </tr>
+        ))}
+      </tbody>
+    </Table>
+  );
+}

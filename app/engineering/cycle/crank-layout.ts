@@ -24,16 +24,20 @@ export interface CrankLayout {
   mains: number;
 }
 
+const turn = 2 * Math.PI;
+/** Firings nearer than this are one and the same. */
+const together = 0.01 * degrees;
+
 /**
  * Crank angle of firing for each cylinder, by number, rad, 0 to under one cycle: its throw points along its axis once
- * a turn, and the firing order says which turn.
+ * a turn; of its turns it fires in the one nearest to even firing that the order allows.
  * @throws EngineeringError `crank-layout` where a cylinder has no throw or more than one, `firing-order` where the
  *   order is not one of all cylinders or cannot be fired by these throws in one cycle
  */
 export function firingAngles({ axes, throws, firingOrder }: CrankLayout): number[] {
   const count = axes.length;
-  const numbers = throws.flatMap((each) => each.cylinders);
-  if (!eachOnce(numbers, count)) {
+  const hung = throws.flatMap((each) => each.cylinders);
+  if (!eachOnce(hung, count)) {
     throw new EngineeringError("crank-layout", "layout.throws", "Every cylinder must run on one throw.");
   }
   if (!eachOnce(firingOrder, count)) {
@@ -43,16 +47,20 @@ export function firingAngles({ axes, throws, firingOrder }: CrankLayout): number
       "Every cylinder must fire once in the order.",
     );
   }
+  const topAngle = (number: number) => {
+    const hanging = throws.find((each) => each.cylinders.includes(number))!;
+    return cycleAngle(axes[number - 1]! - hanging.angle, turn);
+  };
+  const first = topAngle(firingOrder[0]!);
   const angles = new Array<number>(count);
   let last = Number.NEGATIVE_INFINITY;
-  for (const number of firingOrder) {
-    const hanging = throws.find((each) => each.cylinders.includes(number))!;
-    const top = cycleAngle(axes[number - 1]! - hanging.angle, 2 * Math.PI);
-    // Two cylinders may fire together, so a thousandth of a degree early still counts as now.
-    const first = angles[firingOrder[0]! - 1] ?? top;
-    const turns = Math.max(0, Math.ceil((last - top - 1e-3 * degrees) / (2 * Math.PI)));
-    last = top + turns * 2 * Math.PI;
-    if (!(last - first < engineCycleAngle)) {
+  firingOrder.forEach((number, place) => {
+    const top = topAngle(number);
+    const even = first + (place * engineCycleAngle) / count;
+    const nearest = top + turn * Math.ceil((even - top) / turn - 0.5);
+    const later = Math.ceil((last + together - nearest) / turn);
+    last = nearest + turn * Math.max(0, later);
+    if (last - first > engineCycleAngle - together) {
       throw new EngineeringError(
         "firing-order",
         "layout.firingOrder",
@@ -60,7 +68,7 @@ export function firingAngles({ axes, throws, firingOrder }: CrankLayout): number
       );
     }
     angles[number - 1] = last;
-  }
+  });
   return angles.map((angle) => cycleAngle(angle, engineCycleAngle));
 }
 

@@ -1,4 +1,5 @@
 import { EngineeringError } from "../engineering-error";
+import type { Bearing } from "./bearing";
 import { type BigEndLoad, bigEndLoad, type Cylinder } from "./big-end-load";
 import { degrees, engineCycleAngle } from "./crank-angle";
 import type { CrankLayout } from "./crank-layout";
@@ -6,7 +7,7 @@ import { ambientPressure, type CylinderPressure, type GasCycle, gasPressure } fr
 import type { LoadPoint } from "./load-cycle";
 import { type CrankBalance, mainLoads } from "./main-load";
 import type { FilmModel } from "./mobility";
-import { type Bearing, type Orbit, orbit } from "./orbit";
+import { type Orbit, orbit } from "./orbit";
 import { type TracePoint, tracePressure } from "./pressure-trace";
 import { requireSliderCrank } from "./slider-crank";
 import { requireWithin } from "./sound-input";
@@ -15,7 +16,7 @@ import { requireWithin } from "./sound-input";
 export type EngineDuty = Cylinder & {
   /** Of the crank, rad/s. */
   speed: number;
-} & (GasCycle | { pressureTrace: readonly TracePoint[] });
+} & ((GasCycle & { pressureTrace?: undefined }) | { pressureTrace: readonly TracePoint[] });
 
 /** The oil film of one bearing in an engine. */
 export interface FilmDuty {
@@ -92,8 +93,8 @@ function everyDegree(load: (crankAngle: number) => BigEndLoad): LoadPoint[] {
 /** The load of an engine's big end by crank angle, its cylinder checked first. */
 function loadsOf(engine: EngineDuty) {
   requireCylinder(engine);
-  const gas = "pressureTrace" in engine ? null : gasPressure(engine, engine);
-  const pressure = "pressureTrace" in engine ? tracePressure(engine.pressureTrace) : gas!.at;
+  const gas = engine.pressureTrace ? null : gasPressure(engine, engine);
+  const pressure = engine.pressureTrace ? tracePressure(engine.pressureTrace) : gas!.at;
   const area = (Math.PI / 4) * engine.bore ** 2;
   return {
     load: (crankAngle: number) =>

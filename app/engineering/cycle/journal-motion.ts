@@ -29,7 +29,7 @@ export interface Pace {
 }
 
 /** Share of the film that one step may be wrong by. */
-const tolerance = 1e-3;
+const tolerance = 1e-4;
 
 /**
  * The speed of the journal's centre, in radial clearances a second: de/dt = F (C/R)² / (µ L D) · M + ω̄ × e.

@@ -1,28 +1,15 @@
 import { radial } from "../radial";
-import {
-  type Drive,
-  type Journal,
-  journalVelocity,
-  moveJournal,
-  type Pace,
-  type Place,
-} from "./journal-motion";
+import { type Bearing, requireBearing } from "./bearing";
+import { filmPower, type Instant } from "./film-power";
+import { type Journal, moveJournal, type Pace, type Place } from "./journal-motion";
 import { type LoadPoint, loadCycle } from "./load-cycle";
 import { type FilmModel, filmModelFor, mobility } from "./mobility";
 import { requireWithin } from "./sound-input";
 
-/** A plain bearing, film all round: a groove in the loaded half is not in it. */
-export interface Bearing {
-  /** m */
-  diameter: number;
-  /** Of the film along the axis, m. */
-  length: number;
-  /** Diametral, m. */
-  clearance: number;
-}
-
 /** How the sleeve turns in the frame the loads are given in. */
-export type SleeveMotion = { sleeveFixed: true } | { sleeveSpeed: number };
+export type SleeveMotion =
+  | { sleeveFixed: true; sleeveSpeed?: undefined }
+  | { sleeveFixed?: undefined; sleeveSpeed: number };
 
 /** One bearing's duty over a cycle. */
 export type OrbitDuty = SleeveMotion & {
@@ -77,8 +64,8 @@ const closestKnown = 0.99;
  * The orbit of a journal over an engine cycle by Booker's mobility method, run until two cycles agree.
  * The frame is that of the loads: with `sleeveFixed` the bearing's own (the rod or the block), in which the journal
  * turns at the crank's speed or at the `journalSpeed` of the points; a sleeve that turns in that frame has a
- * `sleeveSpeed`. What carries is the mean of the two less the turning of the load; the frame moves with the load's
- * axes, so that is counted.
+ * `sleeveSpeed`. The film is carried round at the mean of the two as seen in the frame, so a frame that turns itself
+ * (a rod, or one that follows a turning load) needs nothing more than speeds seen from it.
  * Range: L/D to 1.5, rigid parts, one viscosity, a film full of oil. Expected error of the film: 3 % (finite) against
  * the Reynolds equation; real bearings bend, starve and heat, so films below a few micrometres are a comparison only.
  * @throws EngineeringError for input outside physical range, and as `loadCycle` and `mobility`
@@ -88,7 +75,7 @@ export function orbit(duty: OrbitDuty): Orbit {
   requireBearing(bearing);
   requireWithin(viscosity, "viscosity", { from: 1e-5, to: 100, unit: "Pa·s" });
   requireWithin(speed, "speed", { from: 0.1, to: 1e4, unit: "rad/s" });
-  const sleeveSpeed = "sleeveSpeed" in duty ? duty.sleeveSpeed : 0;
+  const { sleeveSpeed = 0 } = duty;
   requireWithin(sleeveSpeed, "sleeveSpeed", { from: -1e4, to: 1e4, unit: "rad/s" });
   const lengthToDiameter = bearing.length / bearing.diameter;
   const model = duty.film === undefined || duty.film === "auto" ? filmModelFor(lengthToDiameter) : duty.film;
@@ -111,7 +98,7 @@ export function orbit(duty: OrbitDuty): Orbit {
   });
   const thinnest = samples.reduce((least, sample) => (sample.film < least.film ? sample : least));
   const heat = instants.reduce(
-    (sum, instant, index) => sum + filmPower(duty, journal, run.places[index]!, instant),
+    (sum, instant, index) => sum + filmPower(bearing, viscosity, journal, run.places[index]!, instant),
     0,
   );
   return {
@@ -126,8 +113,12 @@ export function orbit(duty: OrbitDuty): Orbit {
   };
 }
 
-/** Share of the cycle, 0–1, in which the film is below a limit, m; straight lines between the samples. */
+/**
+ * Share of the cycle, 0–1, in which the film is below a limit, m; straight lines between the samples.
+ * @throws EngineeringError `not-a-number`, `not-positive`, `outside-range`
+ */
 export function shareBelow(samples: readonly OrbitPoint[], limit: number): number {
+  requireWithin(limit, "limit", { from: 1e-12, to: 1, unit: "m" });
   const below = samples.reduce((sum, { film }, index) => {
     const next = samples[(index + 1) % samples.length]!.film;
     const [low, high] = film < next ? [film, next] : [next, film];
@@ -135,13 +126,6 @@ export function shareBelow(samples: readonly OrbitPoint[], limit: number): numbe
     return low < limit ? sum + (limit - low) / (high - low) : sum;
   }, 0);
   return below / samples.length;
-}
-
-interface Instant {
-  crankAngle: number;
-  drive: Drive;
-  /** Of the journal over the sleeve, rad/s. */
-  slidingSpeed: number;
 }
 
 /** Runs whole cycles from the middle of the bearing until two agree, or the bounds are reached. */
@@ -172,34 +156,4 @@ function agree(before: readonly Place[], after: readonly Place[]): boolean {
       return change <= agreement * film && Math.hypot(x - old.x, y - old.y) <= agreement;
     })
   );
-}
-
-/**
- * Heat made in the film at one instant, W: the work of the load on the journal's motion through the film, and shear
- * all round it, F · (de/dt − ω̄ × e) + 2 π µ R³ L Δω² / (C √(1 − ε²)). Its steady form is the bearing's friction.
- * Source: dissipation of the Reynolds film, Poiseuille and Couette parts (own derivation; agrees with the friction
- * column of M. Khonsari & J. Booser, Applied Tribology, finite-bearing table).
- */
-function filmPower(
-  { bearing, viscosity }: OrbitDuty,
-  journal: Journal,
-  place: Place,
-  instant: Instant,
-): number {
-  const { drive, slidingSpeed } = instant;
-  const clearance = radial(bearing.clearance);
-  const squeeze = journalVelocity(journal, place.x, place.y, { ...drive, meanSpeed: 0 });
-  const pressed = (drive.x * squeeze.x + drive.y * squeeze.y) * clearance;
-  const eccentricity = Math.hypot(place.x, place.y);
-  const sheared =
-    (2 * Math.PI * viscosity * (bearing.diameter / 2) ** 3 * bearing.length * slidingSpeed ** 2) /
-    (clearance * Math.sqrt(1 - eccentricity ** 2));
-  return pressed + sheared;
-}
-
-/** @throws EngineeringError `not-a-number`, `not-positive`, `outside-range` */
-export function requireBearing({ diameter, length, clearance }: Bearing): void {
-  requireWithin(diameter, "bearing.diameter", { from: 1e-3, to: 2, unit: "m" });
-  requireWithin(length, "bearing.length", { from: 1e-4, to: 2, unit: "m" });
-  requireWithin(clearance, "bearing.clearance", { from: 1e-7, to: diameter / 20, unit: "m" });
 }

@@ -42,6 +42,7 @@ describe("a mobility", () => {
 
   test("comes from the model a length asks for, and from none beyond its table", () => {
     expect([0.05, 0.1, 0.4, 1.5].map(filmModelFor)).toEqual(["short", "finite", "finite", "finite"]);
+    expect(mobility((0.05 * 1.5) / 0.05, "finite")(0.5, 0).along).toBeGreaterThan(0);
     expect(() => mobility(1.6, "finite")).toThrow(expect.objectContaining({ code: "outside-range" }));
     expect(() => mobility(Number.NaN, "finite")).toThrow(expect.objectContaining({ code: "outside-range" }));
   });

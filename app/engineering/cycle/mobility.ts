@@ -13,8 +13,9 @@ export type Mobility = (along: number, across: number) => MobilityVector;
 /** Which film model a mobility comes from. */
 export type FilmModel = "short" | "finite";
 
-const shortest = lengthToDiameters[0]!;
-const longest = lengthToDiameters[lengthToDiameters.length - 1]!;
+// A length of exactly so many diameters may come out a rounding beside it.
+const shortest = lengthToDiameters[0]! * (1 - 1e-9);
+const longest = lengthToDiameters[lengthToDiameters.length - 1]! * (1 + 1e-9);
 
 /** The film model that a bearing's length asks for: finite from L/D 0.1, the shortest of its table; short below. */
 export function filmModelFor(lengthToDiameter: number): FilmModel {
@@ -33,7 +34,7 @@ export function mobility(lengthToDiameter: number, model: FilmModel): Mobility {
 /**
  * Booker's curve fit of the short bearing whose film breaks at ambient pressure.
  * Expected error against the exact short bearing: up to 2.4 % in steady load, 6 % in the vector below ε 0.8; the short
- * bearing itself carries more than a finite one, the more so the thinner the film (19 % at L/D 0.25, ε 0.8).
+ * bearing itself carries more than a finite one, the more so the thinner the film (18 % at L/D 0.25, ε 0.8).
  * Source: J. F. Booker, J. Basic Engineering 87 (1965) 537–546, as in P. Flores (2006), seen in a public program.
  */
 function shortMobility(lengthToDiameter: number): Mobility {
@@ -111,11 +112,11 @@ function correctionsFor(lengthToDiameter: number): Float64Array {
     throw new EngineeringError(
       "outside-range",
       "bearing.length",
-      `The finite film is known for a length of ${shortest} to ${longest} diameters, not ${lengthToDiameter.toPrecision(3)}.`,
+      `The finite film is known for a length of ${lengthToDiameters[0]} to ${lengthToDiameters.at(-1)} diameters, not ${lengthToDiameter.toPrecision(3)}.`,
     );
   }
-  const above = lengthToDiameters.findIndex((length) => length >= lengthToDiameter);
-  const start = Math.max(0, Math.min(lengthToDiameters.length - 4, above - 2));
+  const below = lengthToDiameters.findLastIndex((length) => length <= lengthToDiameter);
+  const start = Math.max(0, Math.min(lengthToDiameters.length - 4, below - 1));
   const near = lengthToDiameters.slice(start, start + 4);
   const corrections = new Float64Array(2 * thinnessSteps * cosineSteps);
   near.forEach((length, index) => {

@@ -66,8 +66,9 @@ const closestKnown = 0.99;
  * turns at the crank's speed or at the `journalSpeed` of the points; a sleeve that turns in that frame has a
  * `sleeveSpeed`. The film is carried round at the mean of the two as seen in the frame, so a frame that turns itself
  * (a rod, or one that follows a turning load) needs nothing more than speeds seen from it.
- * Range: L/D to 1.5, rigid parts, one viscosity, a film full of oil. Expected error of the film: 3 % (finite) against
- * the Reynolds equation; real bearings bend, starve and heat, so films below a few micrometres are a comparison only.
+ * Range: L/D to 1.5; rigid parts, one viscosity, a film full of oil. Expected error of the film against the Reynolds
+ * equation: 1 % to ε 0.99 with the finite film. Real bearings bend, starve and heat, so a film of a few micrometres
+ * serves to compare builds, not to promise one.
  * @throws EngineeringError for input outside physical range, and as `loadCycle` and `mobility`
  */
 export function orbit(duty: OrbitDuty): Orbit {

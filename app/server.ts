@@ -2,11 +2,11 @@ import { createServer, type Server } from "node:http";
 import { createRequestListener } from "@react-router/node";
 import { RouterContextProvider, type ServerBuild } from "react-router";
 import sirv from "sirv";
-import { addressContext } from "~/access/who.server";
 import { configuration } from "#database/configuration";
 import { database } from "#database/connection";
 import { seedDemo } from "#database/demo/seed";
 import { migrate } from "#database/migrate";
+import { addressContext } from "~/access/who.server";
 
 /** Brings the database up to date, and in the demo fills a new one with the invented shop. */
 export async function prepareDatabase(): Promise<void> {
@@ -20,7 +20,8 @@ export async function serve(clientDirectory: string): Promise<{ server: Server; 
   const files = sirv(clientDirectory, {
     // Vite's names carry a hash of what is inside, so they never change under a name.
     setHeaders: (response, path) => {
-      if (path.startsWith("/assets/")) response.setHeader("Cache-Control", "public, max-age=31536000, immutable");
+      if (path.startsWith("/assets/"))
+        response.setHeader("Cache-Control", "public, max-age=31536000, immutable");
       response.setHeader("X-Content-Type-Options", "nosniff");
     },
   });
@@ -33,7 +34,9 @@ export async function serve(clientDirectory: string): Promise<{ server: Server; 
       return context;
     },
   });
-  const server = createServer((request, response) => files(request, response, () => pages(request, response)));
+  const server = createServer((request, response) =>
+    files(request, response, () => pages(request, response)),
+  );
   // A body that never ends, or a client that never reads, must not hold a place for ever.
   server.requestTimeout = 120_000;
   server.headersTimeout = 20_000;

@@ -16,7 +16,11 @@ authenticator.use(
   new FormStrategy(async ({ form }) => {
     const typed = credentials.safeParse(Object.fromEntries(form));
     if (!typed.success) {
-      throw invalid({ path: "email", code: "incomplete", message: "Type your e-mail address and your password." });
+      throw invalid({
+        path: "email",
+        code: "incomplete",
+        message: "Type your e-mail address and your password.",
+      });
     }
     const { email, password } = typed.data;
     const matches = await passwordMatches(email, password);

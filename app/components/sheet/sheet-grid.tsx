@@ -149,7 +149,6 @@ export function SheetGrid(props: SheetGridProps) {
   const bores = stations.filter((station) => station.feature === "bore");
   const journals = stations.filter((station) => station.feature === "journal");
   return (
-    // biome-ignore lint/a11y/noNoninteractiveElementToInteractiveRole: a table is what the grid pattern builds on
     <table
       ref={grid}
       role="grid"

@@ -21,7 +21,6 @@ export const SheetRow = memo(function SheetRow({
   index,
   title,
   store,
-  activeKey,
   frozen,
   before,
   words,
@@ -45,7 +44,6 @@ export const SheetRow = memo(function SheetRow({
         {title}
       </th>
       {row.map((box, column) => (
-        // biome-ignore lint/a11y/useSemanticElements: a gridcell in a grid is a td with that role
         <td
           key={box.key}
           role="gridcell"

@@ -1,18 +1,16 @@
-import { useId } from "react";
+import { type InputHTMLAttributes, useId } from "react";
 import { FieldError } from "./field";
 
-interface ChoiceProps {
+interface ChoiceProps extends Omit<InputHTMLAttributes<HTMLInputElement>, "defaultValue" | "type"> {
   legend: string;
-  name: string;
   type: "radio" | "checkbox";
   options: readonly { value: string; label: string }[];
   defaultValue?: string | readonly string[];
   error?: string | undefined;
-  onChange?: (value: string) => void;
 }
 
 /** Radio buttons or ticks under one legend. */
-export function Choice({ legend, name, type, options, defaultValue, error, onChange }: ChoiceProps) {
+export function Choice({ legend, type, options, defaultValue, error, ...input }: ChoiceProps) {
   const id = useId();
   const chosen = typeof defaultValue === "string" ? [defaultValue] : (defaultValue ?? []);
   return (
@@ -24,11 +22,10 @@ export function Choice({ legend, name, type, options, defaultValue, error, onCha
           <label key={option.value} className="flex min-h-11 items-center gap-2">
             <input
               type={type}
-              name={name}
               value={option.value}
               defaultChecked={chosen.includes(option.value)}
-              onChange={(event) => onChange?.(event.currentTarget.value)}
               className="size-5 accent-layout"
+              {...input}
             />
             {option.label}
           </label>

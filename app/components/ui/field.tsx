@@ -15,7 +15,7 @@ export function Field({ label, hint, suffix, error, id, ...input }: FieldProps) 
   const own = useId();
   const boxId = id ?? own;
   return (
-    <div>
+    <div className="flex flex-col">
       <label htmlFor={boxId} className="mb-1 block font-semibold">
         {label}
       </label>
@@ -25,7 +25,7 @@ export function Field({ label, hint, suffix, error, id, ...input }: FieldProps) 
         </p>
       )}
       {error && <FieldError id={`${boxId}-error`} message={error} />}
-      <span className="flex items-center gap-2">
+      <span className="mt-auto flex items-center gap-2">
         <input
           id={boxId}
           type="text"

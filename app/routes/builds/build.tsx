@@ -19,7 +19,7 @@ import { fieldErrors, fieldsOf } from "~/routes/form-fields";
 import type { Route } from "./+types/build";
 import { BuildTabs } from "./build-tabs";
 
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Build"} · Tenthbook` },
 ];
 

@@ -1,8 +1,8 @@
+import type { Iteration, NextStep } from "~/engineering/next-step/types";
 import { clearanceText, dayText, type PageUnits } from "~/engineering/quantity/figures";
-import { picometres } from "~/engineering/quantity/length";
-import type { NextStep } from "~/engineering/next-step/types";
+import { metres, picometres } from "~/engineering/quantity/length";
 import { fitKind } from "~/engineering/trade/fit-kinds";
-import { wearBars } from "~/engineering/wear/wear-bars";
+import { wearOfClearances } from "~/engineering/wear/wear-of-clearances";
 import type { Fit } from "~/models/fit.server";
 import type { PastDecision, StoredProposal } from "~/models/proposal.server";
 import { pastDecisions } from "~/routes/engines/past-decisions";
@@ -37,8 +37,8 @@ export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDec
       day: dayText(signOff.signedAt),
     },
     strip: build && {
-      aim: build.target,
-      limits: history.fit.hardLimits,
+      window: windowAround(fit, build.target),
+      limits: { least: metres(fit.least_pm), most: metres(fit.most_pm) },
       positions: build.positions.map((position) => ({
         number: position.position,
         assembled: position.assembled?.clearance,
@@ -47,12 +47,25 @@ export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDec
       likelyLimit: likelyLimit(answer),
       step: answer.step === 0 ? undefined : { from: answer.target - answer.step, to: answer.target },
     },
-    wear: build ? wearBars(build) : [],
+    wear: build ? wearOfClearances(beforeAfter(build), build.hours) : [],
     decisions: pastDecisions(decisions, units),
   };
 }
 
 export type FitReviewData = ReturnType<typeof fitReview>;
+
+function windowAround(fit: Fit, aim: number) {
+  const tolerance = metres(fit.tolerance_pm);
+  return { least: aim - tolerance, aim, most: aim + tolerance };
+}
+
+function beforeAfter(build: Iteration) {
+  return build.positions.flatMap(({ position, assembled, tornDown, uncertainty }) =>
+    assembled && tornDown && uncertainty
+      ? [{ position, assembled: assembled.clearance, tornDown: tornDown.clearance, uncertainty }]
+      : [],
+  );
+}
 
 /** The narrowest band of the belief that is worth drawing: "7 in 10 that the limit lies here". */
 function likelyLimit(answer: NextStep) {

@@ -20,7 +20,7 @@ import { BuildTabs } from "./build-tabs";
 import { FitReview } from "./fit-review";
 import { fitReview } from "./fit-review.server";
 
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Review"} · Tenthbook` },
 ];
 

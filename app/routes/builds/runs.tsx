@@ -20,7 +20,7 @@ import type { Route } from "./+types/runs";
 import { BuildTabs } from "./build-tabs";
 import { runForm } from "./run-form";
 
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Runs"} · Tenthbook` },
 ];
 

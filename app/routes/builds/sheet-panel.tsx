@@ -10,12 +10,7 @@ import { Button } from "~/components/ui/button";
 import { Choice } from "~/components/ui/choice";
 import { Field } from "~/components/ui/field";
 import { Select } from "~/components/ui/select";
-import {
-  clearanceUnit,
-  diameterUnit,
-  diameterUnitName,
-  type PageUnits,
-} from "~/engineering/quantity/figures";
+import { diameterUnitName, type PageUnits } from "~/engineering/quantity/figures";
 import { stationName } from "~/engineering/trade/fit-kinds";
 import { expectedValue, readSheetBox, rowClearance, rowFigures } from "./sheet-figures";
 import type { GaugeChoice, Sheet } from "./sheet-view.server";
@@ -73,7 +68,9 @@ export function SheetPanel(props: SheetPanelProps) {
     number: position.number,
     assembled: rowClearance(judge, position.id, (key) => store.box(key).valuePm)?.vertical,
   }));
-  const status = statusOf(store, unreachable, isScripted);
+  const boxes = sheet.positions.flatMap((position) => rowOf(sheet, position.id));
+  const blank = boxes.filter((box) => store.box(box.key).text === "").length;
+  const status = `${blank} of ${boxes.length} boxes to go. ${statusOf(store, unreachable, isScripted)}`;
   return (
     <section aria-label={`${sheet.name}, ${props.stage} sheet`}>
       <Form method="post" noValidate onSubmit={(event) => isScripted && event.preventDefault()}>
@@ -113,7 +110,7 @@ export function SheetPanel(props: SheetPanelProps) {
                   { value: "station", label: "through the parts" },
                 ]}
                 defaultValue={travel}
-                onChange={(value) => setTravel(value as "position" | "station")}
+                onChange={(event) => setTravel(event.currentTarget.value as "position" | "station")}
               />
             )}
           </div>
@@ -164,7 +161,7 @@ export function SheetPanel(props: SheetPanelProps) {
       <div className="mt-6">
         <FitStrip
           title={`${sheet.name}, as measured`}
-          unit={clearanceUnit(units)}
+          units={units}
           window={sheet.window}
           limits={sheet.limits}
           positions={clearances}
@@ -227,7 +224,7 @@ function Troubles({ sheet, store, onFix }: TroublesProps) {
   return (
     <ul aria-live="polite" className="mt-3">
       {troubled.map(({ box, state }) => (
-        <li key={box.key} className="py-1 text-stop">
+        <li key={box.key} className={`py-1 ${state.error ? "text-stop" : "text-watch"}`}>
           {sheet.position} {box.position.number}, {sheet[box.station.feature]} {stationName(box.station)}:{" "}
           {state.error ?? state.warning?.message}{" "}
           {!state.error && state.warning?.suggestion && (

@@ -16,13 +16,12 @@ import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import type { Route } from "./+types/sheet";
 import { BuildTabs } from "./build-tabs";
 import { FitPicker } from "./fit-picker";
+import { orUnreachable } from "./or-unreachable";
 import { saveBoxes } from "./sheet-action.server";
 import { SheetPanel } from "./sheet-panel";
 import { boxStates, gaugeChoice, sheetOf } from "./sheet-view.server";
 
-export { clientAction } from "./sheet-client-action";
-
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Sheet"} · Tenthbook` },
 ];
 
@@ -97,6 +96,8 @@ export async function action({ request, context, params }: Route.ActionArgs) {
     return answer;
   });
 }
+
+export const clientAction = ({ serverAction }: Route.ClientActionArgs) => orUnreachable(serverAction());
 
 export default function SheetPage({ loaderData, actionData }: Route.ComponentProps) {
   const errors = actionData && "errors" in actionData ? actionData.errors : [];

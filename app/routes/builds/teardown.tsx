@@ -22,13 +22,12 @@ import { fieldErrors, fieldsOf, note, optionalNumber } from "~/routes/form-field
 import type { Route } from "./+types/teardown";
 import { BuildTabs } from "./build-tabs";
 import { FitPicker } from "./fit-picker";
+import { orUnreachable } from "./or-unreachable";
 import { saveBoxes } from "./sheet-action.server";
 import { SheetPanel } from "./sheet-panel";
 import { boxStates, gaugeChoice, sheetOf } from "./sheet-view.server";
 
-export { clientAction } from "./sheet-client-action";
-
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Teardown"} · Tenthbook` },
 ];
 
@@ -140,6 +139,8 @@ export async function action({ request, context, params }: Route.ActionArgs) {
     return null;
   });
 }
+
+export const clientAction = ({ serverAction }: Route.ClientActionArgs) => orUnreachable(serverAction());
 
 export default function Teardown({ loaderData, actionData }: Route.ComponentProps) {
   const refused = actionData && "errors" in actionData ? actionData : undefined;

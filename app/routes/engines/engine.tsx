@@ -9,7 +9,13 @@ import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { Select } from "~/components/ui/select";
 import { Table } from "~/components/ui/table";
-import { clearanceText, clearanceUnit, dayText, diameterText, diameterUnitName } from "~/engineering/quantity/figures";
+import {
+  clearanceText,
+  clearanceUnit,
+  dayText,
+  diameterText,
+  diameterUnitName,
+} from "~/engineering/quantity/figures";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { insertBuild, listBuilds } from "~/models/build.server";
 import { assignEngine, findEngine, listAssignments, unassignEngine } from "~/models/engine.server";
@@ -23,7 +29,7 @@ import { fieldErrors, fieldsOf, note } from "~/routes/form-fields";
 import type { Route } from "./+types/engine";
 import { engineKind, stateWords } from "./words";
 
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.name ?? "Engine"} · Tenthbook` },
 ];
 
@@ -90,11 +96,17 @@ export async function action({ request, context, params }: Route.ActionArgs) {
   const typed = engineAction.safeParse(fieldsOf(form));
   if (!typed.success) return refuseForm(fieldErrors(typed.error), form);
   const asked = typed.data;
-  const { scope } = requirePerson({ request, context }, asked.intent === "start" ? "build:write" : "shop:write");
+  const { scope } = requirePerson(
+    { request, context },
+    asked.intent === "start" ? "build:write" : "shop:write",
+  );
   return orFormErrors(form, async () => {
     switch (asked.intent) {
       case "start": {
-        const buildId = await insertBuild(scope, params.engineId, { oilId: asked.oilId || undefined, note: asked.note });
+        const buildId = await insertBuild(scope, params.engineId, {
+          oilId: asked.oilId || undefined,
+          note: asked.note,
+        });
         throw redirect(href("/builds/:buildId/sheet", { buildId }));
       }
       case "assign":
@@ -140,7 +152,9 @@ export default function EnginePage({ loaderData: engine, actionData }: Route.Com
           {engine.fits.map((fit) => (
             <tr key={fit.id}>
               <th scope="row">
-                <Link to={href("/engines/:engineId/fits/:fitId", { engineId: engine.id, fitId: fit.id })}>{fit.name}</Link>
+                <Link to={href("/engines/:engineId/fits/:fitId", { engineId: engine.id, fitId: fit.id })}>
+                  {fit.name}
+                </Link>
               </th>
               <td>{fit.positions}</td>
               <td>{fit.nominal}</td>
@@ -202,7 +216,9 @@ function Assignments({ engine }: { engine: EngineData }) {
   return (
     <section className="mt-9 max-w-xl">
       <h2 className="mb-2 text-lg font-semibold">Who else sees it</h2>
-      <p className="mb-3 text-mute">Crew chiefs and customers see the engines they are assigned to and no others.</p>
+      <p className="mb-3 text-mute">
+        Crew chiefs and customers see the engines they are assigned to and no others.
+      </p>
       <ul>
         {engine.assigned.map((person) => (
           <li key={person.id} className="flex items-center justify-between border-t border-line">

@@ -8,7 +8,12 @@ import { ErrorSummary } from "~/components/ui/error-summary";
 import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { Select } from "~/components/ui/select";
-import { clearanceUnit, clearanceUnitName, diameterUnitName, type PageUnits } from "~/engineering/quantity/figures";
+import {
+  clearanceUnit,
+  clearanceUnitName,
+  diameterUnitName,
+  type PageUnits,
+} from "~/engineering/quantity/figures";
 import { materials } from "~/engineering/temperature/materials";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findEngine } from "~/models/engine.server";
@@ -19,9 +24,9 @@ import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { fieldErrors, fieldsOf, optionalQuantity, quantity, text } from "~/routes/form-fields";
 import type { Route } from "./+types/fit";
 import { FitCharts } from "./fit-charts";
-import { pastDecisions, PastDecisions } from "./past-decisions";
+import { PastDecisions, pastDecisions } from "./past-decisions";
 
-export const meta: Route.MetaFunction<typeof loader> = ({ loaderData }) => [
+export const meta: Route.MetaFunction = ({ loaderData }) => [
   { title: `${loaderData?.title ?? "Fit"} · Tenthbook` },
 ];
 
@@ -114,7 +119,9 @@ export default function FitPage({ loaderData: fit, actionData }: Route.Component
       ]}
     >
       {fit.builds.length === 0 ? (
-        <p className="mb-6 text-mute">No build of this engine is torn down yet; the first one starts its history.</p>
+        <p className="mb-6 text-mute">
+          No build of this engine is torn down yet; the first one starts its history.
+        </p>
       ) : (
         <FitCharts title={fit.title} units={fit.units} builds={fit.builds} />
       )}
@@ -139,7 +146,7 @@ interface FitSettingsProps {
 }
 
 function FitSettings({ fit, refused }: FitSettingsProps) {
-  const field = (name: keyof typeof fit.fields) => ({
+  const field = (name: Extract<keyof typeof fit.fields, string>) => ({
     name,
     defaultValue: refused?.values[name] ?? fit.fields[name],
     error: refused?.errors.find((error) => error.path === name)?.message,
@@ -161,7 +168,12 @@ function FitSettings({ fit, refused }: FitSettingsProps) {
       <div className="grid grid-cols-2 gap-4 sm:grid-cols-3">
         <Select label="Bore material" {...field("boreMaterial")} options={fit.materials} />
         <Select label="Journal material" {...field("journalMaterial")} options={fit.materials} />
-        <Select label="Coating" {...field("coating")} options={coatings} hint="A new one starts its history anew" />
+        <Select
+          label="Coating"
+          {...field("coating")}
+          options={coatings}
+          hint="A new one starts its history anew"
+        />
         <Field label="Bore finish, Ra" {...field("boreFinish")} />
         <Field label="Journal finish, Ra" {...field("journalFinish")} />
       </div>

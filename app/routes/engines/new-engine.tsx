@@ -31,18 +31,34 @@ export async function action({ request, context }: Route.ActionArgs) {
   });
 }
 
+// What most shops set up, so that the form can be sent with little typed.
+const starting = {
+  name: "",
+  form: "V",
+  cylinders: "8",
+  mains: "5",
+  valvesPerCylinder: "2",
+  bore: "",
+  stroke: "",
+  rodLength: "",
+  revLimitRpm: "",
+  duty: "",
+  environment: "clean",
+} satisfies EngineForm["in"];
+
 export default function NewEngine({ loaderData, actionData }: Route.ComponentProps) {
   const submit = useSubmit();
   const { register, handleSubmit, formState } = useForm<EngineForm["in"], unknown, EngineForm["out"]>({
     resolver: zodResolver(engineForm(loaderData.units)),
     mode: "onTouched",
+    defaultValues: { ...starting, ...(actionData?.values as Partial<EngineForm["in"]> | undefined) },
   });
   const sent = actionData?.errors ?? [];
   const errorOf = (name: keyof EngineForm["in"]) =>
     formState.errors[name]?.message ?? sent.find((error) => error.path === name)?.message;
-  const field = (name: keyof EngineForm["in"], start?: string) => ({
+  const field = (name: keyof EngineForm["in"]) => ({
     ...register(name),
-    defaultValue: actionData?.values[name] ?? start,
+    defaultValue: actionData?.values[name] ?? starting[name],
     error: errorOf(name),
   });
   return (
@@ -63,20 +79,18 @@ export default function NewEngine({ loaderData, actionData }: Route.ComponentPro
         <Field label="Name" {...field("name")} hint="As the shop calls it: Engine 12" />
         <Choice
           legend="Layout"
-          name="form"
+          {...field("form")}
           type="radio"
           options={[
             { value: "inline", label: "Inline" },
             { value: "V", label: "V" },
             { value: "flat", label: "Flat" },
           ]}
-          defaultValue={actionData?.values.form ?? "V"}
-          error={errorOf("form")}
         />
         <div className="grid grid-cols-3 gap-4">
-          <Field label="Cylinders" inputMode="numeric" {...field("cylinders", "8")} />
-          <Field label="Main bearings" inputMode="numeric" {...field("mains", "5")} />
-          <Field label="Valves per cylinder" inputMode="numeric" {...field("valvesPerCylinder", "2")} />
+          <Field label="Cylinders" inputMode="numeric" {...field("cylinders")} />
+          <Field label="Main bearings" inputMode="numeric" {...field("mains")} />
+          <Field label="Valves per cylinder" inputMode="numeric" {...field("valvesPerCylinder")} />
         </div>
         <div className="grid grid-cols-3 gap-4">
           <Field label="Bore" {...field("bore")} hint="4.125 in or 104.78 mm" />
@@ -91,14 +105,12 @@ export default function NewEngine({ loaderData, actionData }: Route.ComponentPro
         </div>
         <Choice
           legend="Where it runs"
-          name="environment"
+          {...field("environment")}
           type="radio"
           options={[
             { value: "clean", label: "Clean" },
             { value: "dusty", label: "Dusty" },
           ]}
-          defaultValue={actionData?.values.environment ?? "clean"}
-          error={errorOf("environment")}
         />
         <div>
           <Button type="submit" variant="primary">

@@ -138,8 +138,8 @@ async function nextAims(transaction: DatabaseTransaction, fits: Fit[], lastBuild
   });
 }
 
-// The window is the aim with the fit's tolerance either side, cut off at the hard limits, which are never left.
-function windowAround(aim: number, fit: Fit) {
+/** The target window: the aim with the fit's tolerance either side, cut off at the hard limits, which are never left. */
+export function windowAround(aim: number, fit: Pick<Fit, "least_pm" | "most_pm" | "tolerance_pm">) {
   return {
     least_pm: Math.min(aim, Math.max(fit.least_pm, aim - fit.tolerance_pm)),
     aim_pm: aim,

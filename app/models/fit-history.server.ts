@@ -1,11 +1,10 @@
 import { createHash } from "node:crypto";
 import { database } from "#database/connection";
-import type { History, Iteration, OilOfRun, PositionOfBuild } from "~/engineering/next-step/types";
-import { dynamicViscosity } from "~/engineering/oil/viscosity";
+import type { FitOfHistory, History } from "~/engineering/next-step/types";
 import { metres } from "~/engineering/quantity/length";
 import type { Fit } from "./fit.server";
 import { listGauges } from "./gauge.server";
-import { type MeasuredPosition, measureFit } from "./measured-fit";
+import { type BuildOfHistory, iterationOfBuild } from "./iteration-of-build";
 import type { StandingReading } from "./reading.server";
 import type { Scope } from "./scope";
 
@@ -37,72 +36,40 @@ export async function fitHistory(scope: Scope, fit: Fit, upTo = Number.MAX_SAFE_
   const findingsOf = groupBy(findings, (finding) => finding.build_id);
   const runsOfBuild = groupBy(runs, (run) => run.build_id);
   return {
-    fit: {
-      kind: fit.kind,
-      nominal: metres(fit.nominal_pm),
-      positions: fit.positions.length,
-      hardLimits: { least: metres(fit.least_pm), most: metres(fit.most_pm) },
-      coating: fit.coating ? { kind: fit.coating, isNew: builds[0]?.coating === fit.coating } : null,
-      finishes: {
-        ...(fit.bore_finish_pm === null ? {} : { bore: metres(fit.bore_finish_pm) }),
-        ...(fit.journal_finish_pm === null ? {} : { journal: metres(fit.journal_finish_pm) }),
-      },
+    fit: fitOfHistory(fit, builds[0]),
+    iterations: builds.map((build) =>
+      iterationOfBuild(
+        fit,
+        build,
+        {
+          readings: readingsOf.get(build.id) ?? [],
+          findings: findingsOf.get(build.id) ?? [],
+          runs: runsOfBuild.get(build.id) ?? [],
+        },
+        gauges,
+      ),
+    ),
+  };
+}
+
+/** The fit itself as the next step takes it. @param first the first build of its history */
+export function fitOfHistory(fit: Fit, first: Pick<BuildOfHistory, "coating"> | undefined): FitOfHistory {
+  return {
+    kind: fit.kind,
+    nominal: metres(fit.nominal_pm),
+    positions: fit.positions.length,
+    hardLimits: { least: metres(fit.least_pm), most: metres(fit.most_pm) },
+    coating: fit.coating ? { kind: fit.coating, isNew: first?.coating === fit.coating } : null,
+    finishes: {
+      ...(fit.bore_finish_pm === null ? {} : { bore: metres(fit.bore_finish_pm) }),
+      ...(fit.journal_finish_pm === null ? {} : { journal: metres(fit.journal_finish_pm) }),
     },
-    iterations: builds.map((build): Iteration => {
-      const ofBuild = readingsOf.get(build.id) ?? [];
-      const assembled = measureFit(
-        fit,
-        ofBuild.filter((reading) => reading.stage === "assembly"),
-        gauges,
-      );
-      const tornDown = measureFit(
-        fit,
-        ofBuild.filter((reading) => reading.stage === "teardown"),
-        gauges,
-      );
-      const found = findingsOf.get(build.id) ?? [];
-      const run = runsOfBuild.get(build.id) ?? [];
-      return {
-        build: build.number,
-        date: build.createdAt.slice(0, 10),
-        target: metres(build.aim_pm),
-        hours: run.length > 0 ? run.reduce((sum, one) => sum + one.hours, 0) : null,
-        starts: run.reduce((sum, one) => sum + (one.starts ?? 0), 0),
-        oil: oilOfRuns(run),
-        events: [...new Set(run.flatMap((one) => JSON.parse(one.events_json) as string[]))],
-        coating: build.coating,
-        positions: fit.positions.map((position): PositionOfBuild => {
-          const finding = found.find((row) => row.position_id === position.id);
-          const before = assembled.find((row) => row.positionId === position.id);
-          const after = tornDown.find((row) => row.positionId === position.id);
-          return {
-            position: position.number,
-            assembled: measured(before),
-            tornDown: measured(after),
-            uncertainty: before?.uncertainty ?? null,
-            temperatureKnown: (before?.temperatureKnown ?? true) && (after?.temperatureKnown ?? true),
-            grade: finding?.grade ?? null,
-            damage: finding?.damage ?? null,
-            coatingState: finding?.coating_state ?? null,
-          };
-        }),
-      };
-    }),
   };
 }
 
 /** A hash of what a proposal was made from: another hash says that the evidence has changed since. */
 export function hashHistory(history: History): string {
   return createHash("sha256").update(JSON.stringify(history)).digest("hex");
-}
-
-function measured(position: MeasuredPosition | undefined) {
-  if (position?.clearance === undefined) return null;
-  return {
-    clearance: position.clearance,
-    ...(position.bore === undefined ? {} : { bore: position.bore }),
-    ...(position.journal === undefined ? {} : { journal: position.journal }),
-  };
 }
 
 function standingReadings(scope: Scope, fitId: string): Promise<(StandingReading & { buildId: string })[]> {
@@ -161,41 +128,6 @@ function runsOf(scope: Scope, buildIds: string[]) {
     .where("run.shop_id", "=", scope.shopId)
     .orderBy("run.started_at")
     .execute();
-}
-
-/** The oil of a build: the one it ran longest on, at the mean temperature that was seen, weighted by hours. */
-function oilOfRuns(runs: Awaited<ReturnType<typeof runsOf>>): OilOfRun | null {
-  const byOil = groupBy(runs, (run) => run.oil_id);
-  const hoursOf = (list: typeof runs) => list.reduce((sum, run) => sum + run.hours, 0);
-  const longest = [...byOil.values()].sort((a, b) => hoursOf(b) - hoursOf(a))[0];
-  const oil = longest?.[0];
-  if (!longest || !oil) return null;
-  const seen = longest.filter((run) => run.oil_temperature_c !== null);
-  const hours = hoursOf(seen);
-  const temperatureC =
-    seen.length === 0
-      ? null
-      : hours > 0
-        ? seen.reduce((sum, run) => sum + run.hours * run.oil_temperature_c!, 0) / hours
-        : seen[0]!.oil_temperature_c;
-  return {
-    name: oil.name,
-    grade: oil.grade,
-    kv40: oil.kv40,
-    kv100: oil.kv100,
-    temperatureC,
-    dynamicViscosity: temperatureC === null ? null : dynamicAt(oil, temperatureC),
-  };
-}
-
-function dynamicAt(
-  oil: { kv40: number; kv100: number; density15: number | null },
-  temperatureC: number,
-): number | null {
-  return dynamicViscosity(
-    { kv40: oil.kv40, kv100: oil.kv100, density15: oil.density15 ?? undefined },
-    temperatureC,
-  );
 }
 
 function groupBy<Item, Key>(items: readonly Item[], keyOf: (item: Item) => Key): Map<Key, Item[]> {

@@ -11,7 +11,8 @@ import type { Fit } from "./fit.server";
 import type { Gauge } from "./gauge.server";
 import type { StandingReading } from "./reading.server";
 
-type MeasuredReading = Pick<
+/** A reading as far as its position's clearance needs it. */
+export type MeasuredReading = Pick<
   StandingReading,
   "positionId" | "feature" | "plane" | "axis" | "valuePm" | "temperatureC" | "gaugeId"
 >;

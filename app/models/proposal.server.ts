@@ -1,7 +1,8 @@
 import { createHash } from "node:crypto";
+import type { Insertable } from "kysely";
 import { database } from "#database/connection";
 import { instant, newId } from "#database/id";
-import type { Decision } from "#database/schema";
+import type { Decision, SignOffTable } from "#database/schema";
 import { nextStep } from "~/engineering/next-step/next-step";
 import type { History, NextStep, Rules } from "~/engineering/next-step/types";
 import { metres, picometres } from "~/engineering/quantity/length";
@@ -12,7 +13,7 @@ import { fitHistory, hashHistory } from "./fit-history.server";
 import { recordHistory } from "./history.server";
 import { conflict, invalid, notFound } from "./refusal";
 import type { Scope } from "./scope";
-import { findShopRules } from "./shop.server";
+import { findShopRules, type ShopRules } from "./shop.server";
 
 /** What the crew chief decided on a proposal. */
 export interface SignOff {
@@ -129,10 +130,9 @@ export async function signProposal(
         person_id: scope.personId,
         signed_at: instant(),
       };
-      const contentHash = createHash("sha256").update(JSON.stringify(row)).digest("hex");
       await transaction
         .insertInto("sign_off")
-        .values({ ...row, content_hash: contentHash })
+        .values({ ...row, content_hash: hashSignOff(row) })
         .execute();
       await recordHistory(transaction, scope, {
         engineId: fit.engine_id,
@@ -144,6 +144,11 @@ export async function signProposal(
       });
     });
   return (await findSignOff(scope, proposal.id)) as SignOff;
+}
+
+/** The hash that is kept with a sign-off, of all that was signed. */
+export function hashSignOff(row: Omit<Insertable<SignOffTable>, "content_hash">): string {
+  return createHash("sha256").update(JSON.stringify(row)).digest("hex");
 }
 
 function signedTarget(fit: Fit, proposal: StoredProposal, signOff: NewSignOff): number {
@@ -225,13 +230,7 @@ async function workOut(
       shop_id: scope.shopId,
       fit_id: fit.id,
       build_id: build.id,
-      action: answer.action,
-      subject: answer.subject,
-      step_pm: picometres(answer.step),
-      target_pm: picometres(answer.target),
-      answer_json: JSON.stringify(answer),
-      history_json: JSON.stringify(history),
-      history_hash: hashHistory(history),
+      ...proposalColumns(answer, history),
       person_id: scope.personId,
       proposed_at: instant(),
     })
@@ -239,9 +238,26 @@ async function workOut(
   return (await findStored(scope, fit, build, history)) as StoredProposal;
 }
 
+/** A proposal for the database: what is proposed, and the evidence it was made from. */
+export function proposalColumns(answer: NextStep, history: History) {
+  return {
+    action: answer.action,
+    subject: answer.subject,
+    step_pm: picometres(answer.step),
+    target_pm: picometres(answer.target),
+    answer_json: JSON.stringify(answer),
+    history_json: JSON.stringify(history),
+    history_hash: hashHistory(history),
+  };
+}
+
 /** The shop's rules for one of its fits, as the next step takes them. */
 export async function rulesFor(scope: Scope, fit: Pick<Fit, "usual_pm">): Promise<Rules> {
-  const shop = await findShopRules(scope);
+  return rulesOfFit(await findShopRules(scope), fit);
+}
+
+/** The same from the shop's rules as they stand. */
+export function rulesOfFit(shop: ShopRules, fit: Pick<Fit, "usual_pm">): Rules {
   return {
     usual: metres(fit.usual_pm),
     largestStep: metres(shop.largest_step_pm),

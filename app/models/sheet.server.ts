@@ -3,9 +3,9 @@ import { type DatabaseTransaction, database } from "#database/connection";
 import { instant, newId } from "#database/id";
 import type { BuildState, Stage } from "#database/schema";
 import { type Build, moveBuild } from "./build.server";
-import { listFindings } from "./finding.server";
+import { type Finding, listFindings } from "./finding.server";
 import { recordHistory } from "./history.server";
-import { listStandingReadings } from "./reading.server";
+import { listStandingReadings, type StandingReading } from "./reading.server";
 import { conflict } from "./refusal";
 import type { Scope } from "./scope";
 
@@ -81,16 +81,30 @@ export async function signTeardown(scope: Scope, build: Build): Promise<void> {
     });
 }
 
-// What a signature stands for: the ids of append-only rows would do, their values make it checkable by eye.
 async function signedContent(scope: Scope, build: Build, stage: Stage) {
   const readings = await listStandingReadings(scope, build.id, stage);
   const findings = stage === "teardown" ? await listFindings(scope, build.id) : [];
+  return sheetContent(build.id, stage, readings, findings);
+}
+
+/** What a signature stands for: the ids of append-only rows would do, their values make it checkable by eye. */
+export function sheetContent(
+  buildId: string,
+  stage: Stage,
+  readings: readonly Pick<StandingReading, "id" | "state" | "valuePm" | "typed">[],
+  findings: readonly Pick<Finding, "id" | "grade" | "damage">[],
+) {
   return {
-    build: build.id,
+    build: buildId,
     stage,
     readings: readings.map((reading) => [reading.id, reading.state, reading.valuePm, reading.typed]),
     findings: findings.map((finding) => [finding.id, finding.grade, finding.damage]),
   };
+}
+
+/** The hash that is kept with a signature: another hash says that the sheet is not the one that was signed. */
+export function hashSheet(content: ReturnType<typeof sheetContent>): string {
+  return createHash("sha256").update(JSON.stringify(content)).digest("hex");
 }
 
 async function insertSignature(
@@ -107,7 +121,7 @@ async function insertSignature(
       shop_id: scope.shopId,
       build_id: build.id,
       stage,
-      content_hash: createHash("sha256").update(JSON.stringify(content)).digest("hex"),
+      content_hash: hashSheet(content),
       person_id: scope.personId,
       signed_at: instant(),
     })

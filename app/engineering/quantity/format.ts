@@ -10,6 +10,8 @@ export interface FormatOptions {
 /**
  * A length in a unit with so many decimals, from exact picometres: rounded half to even (ISO 80000-1, rule A),
  * in whole-number arithmetic, so that no digit comes from a binary fraction.
+ * @throws EngineeringError `not-a-number` for what is no whole number of picometres; `outside-range` for decimals
+ * that are not a whole number from 0 to 100; `wrong-unit` for a unit of something else
  */
 export function formatLength(
   picometres: number,
@@ -20,10 +22,53 @@ export function formatLength(
   if (!Number.isSafeInteger(picometres)) {
     throw new EngineeringError("not-a-number", "value", "A stored length is a whole number of picometres.");
   }
-  const divisor = picometresIn(unit);
-  const scaled = BigInt(Math.abs(picometres)) * 10n ** BigInt(decimals);
-  const rounded = halfToEven(scaled, divisor);
-  return compose(rounded, decimals, picometres < 0 && rounded !== 0n, options);
+  refuseUnsound(decimals);
+  const digits = halfToEven(BigInt(Math.abs(picometres)) * tenToThe(decimals), picometresIn(unit));
+  return compose(digits, decimals, picometres < 0, options);
+}
+
+/**
+ * A quantity of the core (SI; mm²/s; °C) in a unit with so many decimals; lengths through their nearest picometre.
+ * Other kinds are rounded half to even on 15 significant figures in decimal, which is what was typed and not the
+ * binary fraction next to it: 1.35 with one decimal is 1.4.
+ * @throws EngineeringError `not-a-number` for NaN or infinity, which are never shown; `outside-range` for decimals
+ */
+export function format(value: number, unit: UnitName, decimals: number, options: FormatOptions = {}): string {
+  if (!Number.isFinite(value)) {
+    throw new EngineeringError("not-a-number", "value", "This value is no number.");
+  }
+  if (isUnitOf(unit, "length")) return formatLength(picometres(value), unit, decimals, options);
+  refuseUnsound(decimals);
+  const there = fromCore(value, unit);
+  const [mantissa = "", exponent = "0"] = Math.abs(there)
+    .toExponential(significantFigures - 1)
+    .split("e");
+  const figures = BigInt(mantissa.replace(".", ""));
+  const shift = Number(exponent) - (significantFigures - 1);
+  const digits =
+    shift >= 0
+      ? figures * tenToThe(shift) * tenToThe(decimals)
+      : halfToEven(figures * tenToThe(decimals), tenToThe(-shift));
+  return compose(digits, decimals, there < 0, options);
+}
+
+/** The same with the unit behind it: "0.0025 in", "105.0 °C". */
+export function formatWithUnit(
+  value: number,
+  unit: UnitName,
+  decimals: number,
+  options: FormatOptions = {},
+): string {
+  return `${format(value, unit, decimals, options)} ${unitLabel(unit)}`;
+}
+
+const significantFigures = 15;
+
+const tenToThe = (power: number): bigint => 10n ** BigInt(power);
+
+function refuseUnsound(decimals: number): void {
+  if (Number.isInteger(decimals) && decimals >= 0 && decimals <= 100) return;
+  throw new EngineeringError("outside-range", "decimals", "Decimals are a whole number from 0 to 100.");
 }
 
 function halfToEven(numerator: bigint, divisor: bigint): bigint {
@@ -33,6 +78,7 @@ function halfToEven(numerator: bigint, divisor: bigint): bigint {
   return whole + 1n;
 }
 
+/** Puts the point and the sign to whole digits; a zero has no sign. */
 function compose(
   digits: bigint,
   decimals: number,
@@ -42,22 +88,6 @@ function compose(
   const text = digits.toString().padStart(decimals + 1, "0");
   const whole = text.slice(0, text.length - decimals);
   const behind = decimals > 0 ? `.${text.slice(-decimals)}` : "";
-  return `${negative ? "-" : ""}${dropLeadingZero && whole === "0" && behind ? "" : whole}${behind}`;
-}
-
-/**
- * A quantity of the core (SI; mm²/s; °C) in a unit with so many decimals; lengths through their nearest picometre.
- * @throws EngineeringError `not-a-number` for NaN or infinity: they are never shown
- */
-export function format(value: number, unit: UnitName, decimals: number, options: FormatOptions = {}): string {
-  if (!Number.isFinite(value))
-    throw new EngineeringError("not-a-number", "value", "This value is no number.");
-  if (isUnitOf(unit, "length")) return formatLength(picometres(value), unit, decimals, options);
-  const text = fromCore(value, unit).toFixed(decimals);
-  return Number(text) === 0 ? text.replace("-", "") : text;
-}
-
-/** The same with the unit behind it: "0.0025 in", "105.0 °C". */
-export function formatWithUnit(value: number, unit: UnitName, decimals: number): string {
-  return `${format(value, unit, decimals)} ${unitLabel(unit)}`;
+  const sign = negative && digits !== 0n ? "-" : "";
+  return `${sign}${dropLeadingZero && whole === "0" && behind ? "" : whole}${behind}`;
 }

@@ -1,5 +1,6 @@
 import { EngineeringError } from "../engineering-error";
 import { metres } from "./length";
+import { type Decimal, readNumber } from "./number";
 import {
   findUnit,
   isUnitOf,
@@ -8,7 +9,7 @@ import {
   toCore,
   type UnitName,
   unitLabel,
-  unitsOf,
+  usualUnits,
 } from "./units";
 
 /** A quantity as it was typed and as the core takes it. */
@@ -33,21 +34,18 @@ export interface ParseOptions {
   nominal?: number;
 }
 
-/** A decimal number as its digits and how many of them stand behind the point: exact, whatever its length. */
-interface Decimal {
-  digits: bigint;
-  decimals: number;
-  signed: boolean;
-}
-
 const longest = 60;
-const mostDecimals = 18;
+// Twelve figures come back unchanged through any of the units' factors in double precision; no instrument shows more.
+const mostFigures = 10n ** 12n;
+const largest = 1e15;
+const absoluteZeroC = -273.15;
 
 /**
  * Reads a quantity as a builder types it: `2.1000`, `53,34 mm`, `25 tenths`, `1 7/8 in`, `+3 tenths` from a nominal.
- * Lengths are read digit by digit, so that what is stored is exactly what was typed.
+ * Lengths are read digit by digit, so that what is stored is exactly what was typed; other kinds take up to twelve
+ * figures. Written out again in their unit and decimals, all give the typed digits.
  * @throws EngineeringError with a stable code: `empty`, `too-long`, `not-a-number`, `ambiguous`, `no-unit`,
- * `wrong-unit`, `too-large`, `too-fine`
+ * `wrong-unit`, `too-large`, `too-small` (a temperature), `too-fine` (a length under 1 pm, or too many figures)
  */
 export function parseQuantity(text: string, kind: QuantityKind, options: ParseOptions = {}): Quantity {
   const typed = text.trim();
@@ -56,97 +54,38 @@ export function parseQuantity(text: string, kind: QuantityKind, options: ParseOp
   const { number, unitText } = split(typed);
   const decimal = readNumber(number);
   const unit = readUnit(unitText, kind, options.defaultUnit);
-  if (isUnitOf(unit, "length")) return lengthQuantity(typed, kind, decimal, unit, options.nominal);
-  const value = Number(decimal.digits) / 10 ** decimal.decimals;
-  const si = toCore(value, unit);
-  if (!Number.isFinite(si) || Math.abs(si) > 1e15)
-    throw fault("too-large", "This value is larger than anything in an engine.");
-  if (kind === "temperature" && si < -273.15) throw fault("too-small", "Nothing is colder than −273.15 °C.");
-  return { kind, si, typed, unit, decimals: decimal.decimals };
+  const read = { kind, typed, unit, decimals: decimal.decimals };
+  if (isUnitOf(unit, "length")) return { ...read, ...lengthOf(decimal, unit, options.nominal) };
+  return { ...read, si: coreValue(decimal, unit, kind) };
 }
 
 function fault(code: string, message: string): EngineeringError {
   return new EngineeringError(code, "value", message);
 }
 
-const numberForm = /^([+\-\u2212]?\s*(?:\d[\d.,\u2019' \u00A0\u202F]*|[.,]\d+)(?:\s*\/\s*\d+)?)(.*)$/su;
+const numberThenUnit =
+  /^([+\-\u2212]?\s*(?:\d(?:[\d.,\u2019' \u00A0\u2009\u202F]*[\d.,])?|[.,]\d+)(?:\s*\/\s*\d+)?)(.*)$/su;
 
 function split(typed: string): { number: string; unitText: string } {
-  const match = numberForm.exec(typed);
-  if (!match)
+  const [, number, unit] = numberThenUnit.exec(typed) ?? [];
+  if (number === undefined || unit === undefined) {
     throw fault(
       "not-a-number",
       `"${shortened(typed)}" is no number. Type a value such as 2.1000 in or 53.34 mm.`,
     );
-  return { number: match[1]!.trim(), unitText: match[2]!.trim() };
+  }
+  const unitText = unit.trim();
+  if (/^e[+\-\u2212]?\d/i.test(unitText))
+    throw fault("not-a-number", "Write the number out, without an exponent.");
+  return { number, unitText };
 }
 
 function shortened(typed: string): string {
   return typed.length > 24 ? `${typed.slice(0, 24)}…` : typed;
 }
 
-function readNumber(text: string): Decimal {
-  const signed = /^[+\-\u2212]/.test(text);
-  const negative = /^[-\u2212]/.test(text);
-  const body = text.replace(/^[+\-\u2212]\s*/, "");
-  const fraction = /^(?:(\d+)[ \u00A0\u202F]+)?(\d+)\s*\/\s*(\d+)$/.exec(body);
-  const decimal = fraction ? readFraction(fraction) : readDecimal(body);
-  return { ...decimal, digits: negative ? -decimal.digits : decimal.digits, signed };
-}
-
-/** `1 7/8`: exact where the denominator is a power of two or five, as on any rule; anything else is refused. */
-function readFraction([, whole = "0", numerator, denominator]: RegExpExecArray): Omit<Decimal, "signed"> {
-  const bottom = BigInt(denominator!);
-  for (let decimals = 0; decimals <= 10; decimals++) {
-    const scaled = BigInt(numerator!) * 10n ** BigInt(decimals);
-    if (bottom > 0n && scaled % bottom === 0n) {
-      return { digits: BigInt(whole) * 10n ** BigInt(decimals) + scaled / bottom, decimals };
-    }
-  }
-  throw fault("not-a-number", "Type a fraction in halves down to 1/1024, or a decimal number.");
-}
-
-function readDecimal(body: string): Omit<Decimal, "signed"> {
-  const text = body.replace(/[ \u00A0\u202F\u2019']/g, "");
-  if (
-    /[ \u00A0\u202F\u2019']/.test(body) &&
-    !/^\d{1,3}(?:[ \u00A0\u202F\u2019']\d{3})+(?:[.,]\d+)?$/.test(body)
-  ) {
-    throw fault("not-a-number", "There is a space inside this number; type it as one.");
-  }
-  refuseAmbiguous(text);
-  const plain = /^\d{1,3}(?:,\d{3})+\.\d*$/.test(text)
-    ? text.replaceAll(",", "")
-    : /^\d{1,3}(?:\.\d{3})+,\d*$/.test(text)
-      ? text.replaceAll(".", "").replace(",", ".")
-      : text.replace(",", ".");
-  const [, whole = "", , behind = ""] = /^(\d*)(\.(\d*))?$/.exec(plain) ?? [];
-  if (whole === "" && behind === "") throw fault("not-a-number", `"${shortened(body)}" is no number.`);
-  if (behind.length > mostDecimals) throw fault("too-fine", "This has more decimals than any gauge shows.");
-  return { digits: BigInt(whole + behind), decimals: behind.length };
-}
-
-/** `1,234` is one and a bit to one person and twelve hundred to another: neither is guessed. */
-function refuseAmbiguous(text: string): void {
-  const one = /^([1-9]\d{0,2}),(\d{3})$/.exec(text);
-  if (one) {
-    throw fault(
-      "ambiguous",
-      `${text} can be read as ${one[1]}.${one[2]} or ${one[1]}${one[2]}. Type it with a point, or without the comma.`,
-    );
-  }
-  const several = /^\d{1,3}([.,])\d{3}(?:\1\d{3})+$/.test(text);
-  if (several) {
-    const digits = text.replace(/[.,]/g, "");
-    throw fault(
-      "ambiguous",
-      `${text} can be read as ${digits} or as a slip in the decimal mark. Type it without the marks between.`,
-    );
-  }
-}
-
 function readUnit(written: string, kind: QuantityKind, defaultUnit: UnitName | undefined): UnitName {
-  const choices = unitsOf(kind).map(unitLabel).join(", ");
+  const choices = usualUnits(kind).map(unitLabel).join(", ");
   if (written === "") {
     if (defaultUnit) return defaultUnit;
     throw fault("no-unit", `Say the unit: ${choices}.`);
@@ -159,20 +98,34 @@ function readUnit(written: string, kind: QuantityKind, defaultUnit: UnitName | u
   return unit;
 }
 
-function lengthQuantity(
-  typed: string,
-  kind: QuantityKind,
-  decimal: Decimal,
+function lengthOf(
+  { digits, decimals, signed }: Decimal,
   unit: UnitName,
   nominal: number | undefined,
-): Quantity {
-  const scaled = decimal.digits * picometresIn(unit);
-  const divisor = 10n ** BigInt(decimal.decimals);
-  if (scaled % divisor !== 0n)
+): { si: number; picometres: number } {
+  const scaled = digits * picometresIn(unit);
+  const divisor = 10n ** BigInt(decimals);
+  if (scaled % divisor !== 0n) {
     throw fault("too-fine", "This is finer than a picometre, which no gauge shows.");
-  const exact = scaled / divisor + (decimal.signed && nominal !== undefined ? BigInt(nominal) : 0n);
-  const value = Number(exact);
-  if (!Number.isSafeInteger(value))
+  }
+  const exact = scaled / divisor + (signed && nominal !== undefined ? BigInt(nominal) : 0n);
+  const picometres = Number(exact);
+  if (!Number.isSafeInteger(picometres)) {
     throw fault("too-large", "This length is larger than anything in an engine.");
-  return { kind, si: metres(value), picometres: value, typed, unit, decimals: decimal.decimals };
+  }
+  return { si: metres(picometres), picometres };
+}
+
+function coreValue({ digits, decimals }: Decimal, unit: UnitName, kind: QuantityKind): number {
+  if (digits >= mostFigures || -digits >= mostFigures) {
+    throw decimals > 0
+      ? fault("too-fine", "This has more figures than any instrument shows.")
+      : fault("too-large", "This value is larger than anything in an engine.");
+  }
+  const value = toCore(Number(`${digits}e-${decimals}`), unit);
+  if (Math.abs(value) > largest) throw fault("too-large", "This value is larger than anything in an engine.");
+  // The last bits of a conversion may put absolute zero itself a hair under it.
+  if (kind === "temperature" && value < absoluteZeroC - 1e-9)
+    throw fault("too-small", "Nothing is colder than −273.15 °C.");
+  return value === 0 ? 0 : value;
 }

@@ -49,19 +49,24 @@ interface Unit {
   dimension: Dimension;
   /** How it is written on a page; the name itself where not given. */
   label?: string;
-  /** How many of the core's units one of these is: SI, but mm²/s for kinematic viscosity, °C for temperature. */
+  /** The core's units are `(value - zero) × factor ÷ divisor`: SI, but mm²/s for kinematic viscosity, °C. */
   factor: number;
-  /** Added after the factor: temperatures only. */
-  offset?: number;
+  /** Where the factor is a quotient: dividing at the end keeps 212 °F exactly 100 °C. */
+  divisor?: number;
+  /** What this unit shows at 0 °C: temperatures only. */
+  zero?: number;
   /** Exact, for lengths. */
   picometres?: bigint;
-  /** Other ways people type it, in lower case without spaces. */
+  /** Other ways people type it, without spaces. */
   aliases?: readonly string[];
+  /** Where a capital makes another unit: MPa is a thousand million mPa, so neither is guessed from "mpa". */
+  exactCase?: boolean;
 }
 
 const length = (picometres: bigint, aliases: readonly string[] = [], label?: string): Unit => ({
   dimension: "length",
-  factor: Number(picometres) / 1e12,
+  factor: Number(picometres),
+  divisor: 1e12,
   picometres,
   aliases,
   ...(label ? { label } : {}),
@@ -77,39 +82,51 @@ const inch = 0.0254;
  */
 export const units = {
   in: length(25_400_000_000n, ['"', "″", "”", "''", "inch", "inches"]),
-  thou: length(25_400_000n, ["mil", "mils", "thous"]),
+  thou: length(25_400_000n, ["mil", "mils", "thous", "thousandth", "thousandths"]),
   tenths: length(2_540_000n, ["tenth"]),
   uin: length(25_400n, ['u"', "uinch", "micro-inch", "microinch", "micro-inches", "microinches"], "µin"),
   m: length(1_000_000_000_000n, ["metre", "metres", "meter", "meters"]),
   mm: length(1_000_000_000n, ["millimetre", "millimetres", "millimeter", "millimeters"]),
-  um: length(1_000_000n, ["micron", "microns", "micrometre", "micrometres"], "µm"),
-  nm: length(1_000n, ["nanometre", "nanometres"]),
+  um: length(
+    1_000_000n,
+    ["micron", "microns", "micrometre", "micrometres", "micrometer", "micrometers"],
+    "µm",
+  ),
+  nm: length(1_000n, ["nanometre", "nanometres", "nanometer", "nanometers"]),
 
-  degC: { dimension: "temperature", factor: 1, offset: 0, label: "°C", aliases: ["c", "°c", "celsius"] },
+  degC: { dimension: "temperature", factor: 1, label: "°C", aliases: ["c", "celsius"] },
   degF: {
     dimension: "temperature",
-    factor: 1 / 1.8,
-    offset: -32 / 1.8,
+    factor: 5,
+    divisor: 9,
+    zero: 32,
     label: "°F",
-    aliases: ["f", "°f", "fahrenheit"],
+    aliases: ["f", "fahrenheit"],
   },
-  K: { dimension: "temperature", factor: 1, offset: -273.15, aliases: ["kelvin"] },
+  K: { dimension: "temperature", factor: 1, zero: 273.15, aliases: ["kelvin"] },
 
   Pa: { dimension: "pressure", factor: 1 },
   kPa: { dimension: "pressure", factor: 1e3 },
-  MPa: { dimension: "pressure", factor: 1e6 },
+  MPa: { dimension: "pressure", factor: 1e6, exactCase: true },
   bar: { dimension: "pressure", factor: 1e5 },
   psi: { dimension: "pressure", factor: poundForce / inch ** 2 },
 
-  "Pa s": { dimension: "dynamic-viscosity", factor: 1, label: "Pa·s", aliases: ["pa·s", "pas"] },
-  "mPa s": { dimension: "dynamic-viscosity", factor: 1e-3, label: "mPa·s", aliases: ["mpa·s", "mpas"] },
-  cP: { dimension: "dynamic-viscosity", factor: 1e-3 },
+  "Pa s": { dimension: "dynamic-viscosity", factor: 1, label: "Pa·s" },
+  "mPa s": {
+    dimension: "dynamic-viscosity",
+    factor: 1,
+    divisor: 1e3,
+    label: "mPa·s",
+    aliases: ["mpas"],
+    exactCase: true,
+  },
+  cP: { dimension: "dynamic-viscosity", factor: 1, divisor: 1e3 },
 
-  "m2/s": { dimension: "kinematic-viscosity", factor: 1e6, label: "m²/s", aliases: ["m²/s", "m^2/s"] },
-  "mm2/s": { dimension: "kinematic-viscosity", factor: 1, label: "mm²/s", aliases: ["mm²/s", "mm^2/s"] },
+  "m2/s": { dimension: "kinematic-viscosity", factor: 1e6, label: "m²/s" },
+  "mm2/s": { dimension: "kinematic-viscosity", factor: 1, label: "mm²/s" },
   cSt: { dimension: "kinematic-viscosity", factor: 1 },
 
-  rpm: { dimension: "speed", factor: Math.PI / 30, aliases: ["rev/min", "1/min"] },
+  rpm: { dimension: "speed", factor: Math.PI, divisor: 30, aliases: ["rev/min", "r/min", "1/min"] },
   "rad/s": { dimension: "speed", factor: 1 },
 
   N: { dimension: "force", factor: 1 },
@@ -117,22 +134,22 @@ export const units = {
   lbf: { dimension: "force", factor: poundForce },
 
   kg: { dimension: "mass", factor: 1 },
-  g: { dimension: "mass", factor: 1e-3 },
+  g: { dimension: "mass", factor: 1, divisor: 1e3 },
 
   s: { dimension: "time", factor: 1, aliases: ["sec"] },
   min: { dimension: "time", factor: 60 },
   h: { dimension: "time", factor: 3600, aliases: ["hr", "hour", "hours"] },
 
-  "N m": { dimension: "torque", factor: 1, label: "N·m", aliases: ["n·m", "nm"] },
+  "N m": { dimension: "torque", factor: 1, label: "N·m", aliases: ["nm"] },
   "lbf ft": {
     dimension: "torque",
     factor: poundForce * 0.3048,
     label: "lbf·ft",
-    aliases: ["lbf·ft", "lb ft", "ft lb", "ftlb"],
+    aliases: ["lbft", "ftlb", "ftlbf"],
   },
 
-  "kg/m3": { dimension: "density", factor: 1, label: "kg/m³", aliases: ["kg/m³", "kg/m^3"] },
-  "g/cm3": { dimension: "density", factor: 1e3, label: "g/cm³", aliases: ["g/cm³", "g/cm^3", "g/ml"] },
+  "kg/m3": { dimension: "density", factor: 1, label: "kg/m³" },
+  "g/cm3": { dimension: "density", factor: 1e3, label: "g/cm³", aliases: ["g/ml"] },
 } as const satisfies Record<string, Unit>;
 
 export type UnitName = keyof typeof units;
@@ -142,26 +159,38 @@ export const unitNames = Object.keys(units) as UnitName[];
 
 const unitOf = (name: UnitName): Unit => units[name];
 
-// Case matters only where it must (MPa is not mPa), so every spelling is kept as it is and in lower case.
-const spellings = new Map<string, UnitName[]>();
+const exact = new Map<string, UnitName[]>();
+const folded = new Map<string, UnitName[]>();
 for (const name of unitNames) {
-  for (const spelling of [name, unitOf(name).label, ...(unitOf(name).aliases ?? [])]) {
-    if (spelling === undefined) continue;
-    for (const written of new Set([squeeze(spelling), squeeze(spelling).toLowerCase()])) {
-      const named = spellings.get(written) ?? [];
-      if (!named.includes(name)) spellings.set(written, [...named, name]);
-    }
+  const { label, aliases = [], exactCase } = unitOf(name);
+  for (const spelling of [name, ...(label ? [label] : []), ...aliases]) {
+    enter(exact, squeeze(spelling), name);
+    if (!exactCase) enter(folded, squeeze(spelling).toLowerCase(), name);
   }
 }
 
-function squeeze(text: string): string {
-  return text.replace(/[\s\u00A0\u202F]/g, "").replace(/[µμ]/g, "u");
+function enter(spellings: Map<string, UnitName[]>, written: string, name: UnitName): void {
+  const named = spellings.get(written) ?? [];
+  if (!named.includes(name)) spellings.set(written, [...named, name]);
 }
 
-/** The unit of this spelling that a kind can take; `undefined` where nobody writes a unit so. */
+/** One spelling for what is the same to a reader: µ of either code point, raised figures, the dot of a product. */
+function squeeze(text: string): string {
+  return text
+    .replace(/[\s·⋅^]/g, "")
+    .replace(/[µμ]/g, "u")
+    .replaceAll("²", "2")
+    .replaceAll("³", "3")
+    .replace(/\.$/, "");
+}
+
+/**
+ * The unit of this spelling that a kind can take: `"wrong"` where it is a unit of something else, `undefined` where
+ * nobody writes a unit so. Capitals count only where they make another unit.
+ */
 export function findUnit(written: string, kind: QuantityKind): UnitName | "wrong" | undefined {
   const text = squeeze(written);
-  const named = spellings.get(text) ?? spellings.get(text.toLowerCase());
+  const named = exact.get(text) ?? folded.get(text.toLowerCase());
   if (!named) return undefined;
   return named.find((name) => isUnitOf(name, kind)) ?? "wrong";
 }
@@ -176,21 +205,32 @@ export function unitsOf(kind: QuantityKind): UnitName[] {
   return unitNames.filter((name) => isUnitOf(name, kind));
 }
 
+const usual: Partial<Record<QuantityKind, readonly UnitName[]>> = {
+  "small-length": ["thou", "in", "tenths", "um"],
+  length: ["in", "mm"],
+  finish: ["uin", "um"],
+};
+
+/** The units to offer for a kind, the trade's own first; every unit of `unitsOf` is still read. */
+export function usualUnits(kind: QuantityKind): readonly UnitName[] {
+  return usual[kind] ?? unitsOf(kind);
+}
+
 /** A unit as it is written on a page: µm, °C, mm²/s. */
 export function unitLabel(name: UnitName): string {
   return unitOf(name).label ?? name;
 }
 
-/** A value in a unit as the core takes it. */
+/** A value in a unit as the core takes it: SI, but °C, and mm²/s for kinematic viscosity. */
 export function toCore(value: number, name: UnitName): number {
-  const { factor, offset = 0 } = unitOf(name);
-  return value * factor + offset;
+  const { factor, divisor = 1, zero = 0 } = unitOf(name);
+  return ((value - zero) * factor) / divisor;
 }
 
-/** A value of the core in a unit. */
+/** A value of the core in a unit: `fromCore(kv40, "m2/s")` gives the SI value of a kinematic viscosity. */
 export function fromCore(value: number, name: UnitName): number {
-  const { factor, offset = 0 } = unitOf(name);
-  return (value - offset) / factor;
+  const { factor, divisor = 1, zero = 0 } = unitOf(name);
+  return (value * divisor) / factor + zero;
 }
 
 /** Picometres in one unit of length, exact. @throws EngineeringError `wrong-unit` for a unit of something else */

@@ -36,7 +36,7 @@ export function database(): Database {
 }
 
 /** Puts another database in the program's place, for tests; returns it. */
-export function useDatabase(other: Database): Database {
+export function setDatabase(other: Database): Database {
   held.tenthbookDatabase = other;
   return other;
 }

@@ -14,7 +14,9 @@ export function run(command, args, options = {}) {
 
 /** Installs the packages where the lock file is not the one that they were installed from. */
 export function ensureInstalled() {
-  const lock = createHash("sha256").update(readFileSync(join(root, "package-lock.json"))).digest("hex");
+  const lock = createHash("sha256")
+    .update(readFileSync(join(root, "package-lock.json")))
+    .digest("hex");
   if (existsSync(note("installed")) && readFileSync(note("installed"), "utf8") === lock) return;
   console.log("Installing the packages; the first time takes about two minutes.");
   // Development packages too: the build needs them, whatever NODE_ENV says.

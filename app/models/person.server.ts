@@ -5,6 +5,7 @@ import type { PageUnits } from "#database/schema";
 import type { Role } from "~/access/permissions";
 import { invalid } from "./refusal";
 import type { Scope } from "./scope";
+import { usualRules } from "./shop.server";
 
 /** A person as the pages know them: who, in which shop, in which role. */
 export interface Person {
@@ -122,11 +123,7 @@ export async function insertShop(name: string): Promise<string> {
     .values({
       id,
       name,
-      largest_step_pm: 5_080_000,
-      least_hours: 2,
-      stop_grade: 3,
-      baseline_runs: 1,
-      wear_rate_rise: 1.5,
+      ...usualRules,
       created_at: instant(),
       version: 1,
     })

@@ -2,12 +2,33 @@ import { createHash } from "node:crypto";
 import { type DatabaseTransaction, database } from "#database/connection";
 import { instant, newId } from "#database/id";
 import type { BuildState, Stage } from "#database/schema";
+import { fitKind } from "~/engineering/trade/fit-kinds";
 import { type Build, moveBuild } from "./build.server";
 import { type Finding, listFindings } from "./finding.server";
+import { listFits } from "./fit.server";
 import { recordHistory } from "./history.server";
-import { listStandingReadings, type StandingReading } from "./reading.server";
+import { countStanding, listStandingReadings, type StandingReading } from "./reading.server";
 import { conflict } from "./refusal";
 import type { Scope } from "./scope";
+
+/** How far a sheet is: per fit of the engine, the boxes it has and those that hold something. */
+export async function sheetProgress(scope: Scope, build: Build, stage: Stage) {
+  const [fits, counts] = await Promise.all([
+    listFits(scope, build.engine_id),
+    countStanding(scope, build.id),
+  ]);
+  return fits.map((fit) => ({
+    id: fit.id,
+    name: fitKind(fit.kind).name,
+    due: fit.positions.length * fitKind(fit.kind).stations.length,
+    done: counts.get(`${fit.id} ${stage}`) ?? 0,
+  }));
+}
+
+/** Boxes of a sheet that nobody has filled or marked. */
+export function blankBoxes(progress: Awaited<ReturnType<typeof sheetProgress>>): number {
+  return progress.reduce((sum, fit) => sum + Math.max(0, fit.due - fit.done), 0);
+}
 
 /** Who signed a build's sheets, and when. */
 export function listSignatures(scope: Scope, buildId: string) {

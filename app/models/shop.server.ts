@@ -16,6 +16,15 @@ const ruleColumns = [
 /** The shop's rules for the next step. */
 export type ShopRules = Required<Pick<Updateable<ShopTable>, (typeof ruleColumns)[number]>>;
 
+/** What a new shop starts with (common practice): two tenths at a time, two hours before judging, one clean baseline. */
+export const usualRules: ShopRules = {
+  largest_step_pm: 5_080_000,
+  least_hours: 2,
+  stop_grade: 3,
+  baseline_runs: 1,
+  wear_rate_rise: 1.5,
+};
+
 /** The rules as they stand, with the version to change them by. */
 export function findShopRules(scope: Scope) {
   return database()

@@ -49,7 +49,12 @@ export async function openBrowser(
 }
 
 /** Signs one of the demo's people in and waits for their bench. */
-export async function signIn(page: Page, address: string, email: string, password = demoPassword): Promise<void> {
+export async function signIn(
+  page: Page,
+  address: string,
+  email: string,
+  password = demoPassword,
+): Promise<void> {
   await page.goto(`${address}/sign-in`);
   await page.getByLabel("E-mail address").fill(email);
   await page.getByLabel("Password").fill(password);

@@ -15,7 +15,16 @@ export interface RunningServer {
 export async function startServer(environment: Record<string, string> = {}): Promise<RunningServer> {
   const dataDirectory = environment.DATA_DIR ?? mkdtempSync(join(tmpdir(), "tenthbook-"));
   const child = spawn(process.execPath, ["scripts/start.mjs"], {
-    env: { ...process.env, NODE_ENV: "production", PORT: "0", DEMO: "1", DATA_DIR: dataDirectory, ...environment },
+    // The test runner has variables of its own, a BASE_URL among them; the product gets only what is meant for it.
+    env: {
+      PATH: process.env.PATH,
+      HOME: process.env.HOME,
+      NODE_ENV: "production",
+      PORT: "0",
+      DEMO: "1",
+      DATA_DIR: dataDirectory,
+      ...environment,
+    },
     stdio: ["ignore", "pipe", "pipe"],
   });
   let output = "";

@@ -1,4 +1,4 @@
-import { openDatabase, useDatabase } from "#database/connection";
+import { openDatabase, setDatabase } from "#database/connection";
 import { migrate } from "#database/migrate";
 import { type Role, roles } from "~/access/permissions";
 import { insertPerson, insertShop } from "~/models/person.server";
@@ -18,7 +18,7 @@ export interface ShopOfTests {
 
 /** Puts a new database in the program's place, and two shops in it. */
 export async function openShopOfTests(): Promise<ShopOfTests> {
-  await migrate(useDatabase(openDatabase(":memory:")));
+  await migrate(setDatabase(openDatabase(":memory:")));
   const shopId = await insertShop("Bench of the tests");
   const people = await Promise.all(roles.map(async (role) => [role, await hire(shopId, role)] as const));
   const scopes = Object.fromEntries(people) as Record<Role, Scope>;

@@ -10,8 +10,8 @@ import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findBuild, listTargets } from "~/models/build.server";
 import { listFits } from "~/models/fit.server";
 import { listGauges } from "~/models/gauge.server";
-import { countStanding, listStandingReadings } from "~/models/reading.server";
-import { listSignatures, takeBuildFurther } from "~/models/sheet.server";
+import { listStandingReadings } from "~/models/reading.server";
+import { blankBoxes, listSignatures, sheetProgress, takeBuildFurther } from "~/models/sheet.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import type { Route } from "./+types/sheet";
 import { BuildTabs } from "./build-tabs";
@@ -28,10 +28,10 @@ export const meta: Route.MetaFunction = ({ loaderData }) => [
 export async function loader({ request, context, params }: Route.LoaderArgs) {
   const { person, scope } = requirePerson({ request, context }, "engine:read");
   const build = await orPage(findBuild(scope, params.buildId));
-  const [fits, targets, counts, signatures] = await Promise.all([
+  const [fits, targets, progress, signatures] = await Promise.all([
     listFits(scope, build.engine_id),
     listTargets(scope, build.id),
-    countStanding(scope, build.id),
+    sheetProgress(scope, build, "assembly"),
     listSignatures(scope, build.id),
   ]);
   const asked = new URL(request.url).searchParams.get("fit");
@@ -41,13 +41,6 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     (row) => row.fitId === fit.id,
   );
   const signature = signatures.find((row) => row.stage === "assembly");
-  const progress = fits.map((candidate) => ({
-    id: candidate.id,
-    name: fitKind(candidate.kind).name,
-    due: candidate.positions.length * fitKind(candidate.kind).stations.length,
-    done: counts.get(`${candidate.id} assembly`) ?? 0,
-  }));
-  const blank = progress.reduce((sum, one) => sum + Math.max(0, one.due - one.done), 0);
   const mayWrite = may(person.role, "reading:write") && build.state === "measuring";
   return {
     id: build.id,
@@ -58,7 +51,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     version: build.version,
     units: person.units,
     progress,
-    blank,
+    blank: blankBoxes(progress),
     signed: signature && { by: signature.personName, day: dayText(signature.signedAt) },
     frozen: !mayWrite,
     maySign: may(person.role, "sheet:sign") && build.state === "measuring",
@@ -85,8 +78,9 @@ export async function action({ request, context, params }: Route.ActionArgs) {
     if (form.get("intent") === "sign") {
       requirePerson({ request, context }, "sheet:sign");
       const version = Number(form.get("version"));
-      if (form.get("blank") !== "0" && form.get("accept") !== "blank") {
-        const message = `${form.get("blank")} boxes are blank. Fill them, mark them not measured, or say below that they stay blank.`;
+      const blank = blankBoxes(await sheetProgress(scope, build, "assembly"));
+      if (blank > 0 && form.get("accept") !== "blank") {
+        const message = `${blank} boxes are blank. Fill them, mark them not measured, or say below that they stay blank.`;
         return refuseForm([{ path: "accept", code: "blank-boxes", message }], form);
       }
       await takeBuildFurther(scope, build, "assembled", version);
@@ -146,13 +140,12 @@ export default function SheetPage({ loaderData, actionData }: Route.ComponentPro
           </p>
           <input type="hidden" name="intent" value="sign" />
           <input type="hidden" name="version" value={loaderData.version} />
-          <input type="hidden" name="blank" value={loaderData.blank} />
           {loaderData.blank > 0 && (
             <Choice
               legend="Blank boxes"
               name="accept"
               type="checkbox"
-              options={[{ value: "blank", label: `${loaderData.blank} boxes stay blank` }]}
+              options={[{ value: "blank", label: "What is blank now stays blank" }]}
               error={errors.find((error) => error.path === "accept")?.message}
             />
           )}

@@ -15,8 +15,8 @@ import { findBuild, listTargets } from "~/models/build.server";
 import { insertFinding, listFindings } from "~/models/finding.server";
 import { listFits } from "~/models/fit.server";
 import { listGauges } from "~/models/gauge.server";
-import { countStanding, listStandingReadings } from "~/models/reading.server";
-import { listSignatures, signTeardown } from "~/models/sheet.server";
+import { listStandingReadings } from "~/models/reading.server";
+import { listSignatures, sheetProgress, signTeardown } from "~/models/sheet.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { fieldErrors, fieldsOf, note, optionalNumber } from "~/routes/form-fields";
 import type { Route } from "./+types/teardown";
@@ -37,10 +37,10 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
   if (build.state !== "torn-down" && build.state !== "reviewed") {
     throw data(`Build ${build.number} is not torn down yet.`, { status: 404 });
   }
-  const [fits, targets, counts, signatures, findings] = await Promise.all([
+  const [fits, targets, progress, signatures, findings] = await Promise.all([
     listFits(scope, build.engine_id),
     listTargets(scope, build.id),
-    countStanding(scope, build.id),
+    sheetProgress(scope, build, "teardown"),
     listSignatures(scope, build.id),
     listFindings(scope, build.id),
   ]);
@@ -57,12 +57,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     engineName: build.engineName,
     title: `${build.engineName}, build ${build.number}: teardown, ${fitKind(fit.kind).name.toLowerCase()}`,
     units: person.units,
-    progress: fits.map((candidate) => ({
-      id: candidate.id,
-      name: fitKind(candidate.kind).name,
-      due: candidate.positions.length * fitKind(candidate.kind).stations.length,
-      done: counts.get(`${candidate.id} teardown`) ?? 0,
-    })),
+    progress,
     signed: signature && { by: signature.personName, day: dayText(signature.signedAt) },
     mayMeasure: open && may(person.role, "reading:write"),
     mayFind: open && may(person.role, "finding:write"),

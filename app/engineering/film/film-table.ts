@@ -30,7 +30,9 @@ export interface FilmCurves {
  * Between the table's films the curves are monotone. Error against the solver: under 0.2 %.
  * @throws EngineeringError `not-a-number`, `not-positive`, `outside-range` beyond L/D 0.15–1.5
  */
-export function filmCurves(lengthToDiameter: number): FilmCurves {
+export function filmCurves(lengthOverDiameter: number): FilmCurves {
+  // A length of exactly so many diameters may come out a rounding beside it.
+  const lengthToDiameter = Number(lengthOverDiameter.toPrecision(12));
   requireWithin(lengthToDiameter, "length", tableRange.lengthToDiameter);
   const { capacity, attitude, inflow, sideFlow, peak } = curvesFor(lengthToDiameter);
   const loadAt = (eccentricityRatio: number) =>

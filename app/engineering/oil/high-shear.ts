@@ -3,9 +3,6 @@ import { EngineeringError } from "../engineering-error";
 import type { OilData } from "./oil-data";
 import { dynamicLine } from "./viscosity";
 
-/** Shear rate at which HTHS is measured, 1/s. */
-export const highShearRate = 1e6;
-
 /**
  * The share of its viscosity that an oil keeps at 10⁶ /s, from its HTHS at 150 °C; 1 where HTHS is not known.
  * An HTHS up to 5 % over the unsheared viscosity is taken as the two measurements' scatter, more is refused.

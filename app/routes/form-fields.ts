@@ -13,24 +13,38 @@ export const note = (most = 2000) => z.string().trim().max(most, `At most ${most
 
 /** A quantity with its unit, or in the page's unit where none is typed. */
 export const quantity = (kind: QuantityKind, defaultUnit: UnitName) =>
-  z.string({ error: "Type a value." }).transform((typed, context): Quantity => {
-    try {
-      return parseQuantity(typed, kind, { defaultUnit });
-    } catch (error) {
-      if (!(error instanceof EngineeringError)) throw error;
-      context.addIssue({ code: "custom", message: error.message, params: { code: error.code } });
-      return z.NEVER;
-    }
-  });
+  z.string({ error: "Type a value." }).transform((typed, context) => read(typed, kind, defaultUnit, context));
 
 /** A quantity that may be left blank. */
 export const optionalQuantity = (kind: QuantityKind, defaultUnit: UnitName) =>
-  z.union([z.literal("").transform(() => undefined), quantity(kind, defaultUnit)]).optional();
+  z
+    .string()
+    .transform((typed, context) =>
+      typed.trim() === "" ? undefined : read(typed, kind, defaultUnit, context),
+    )
+    .optional();
+
+function read(
+  typed: string,
+  kind: QuantityKind,
+  defaultUnit: UnitName,
+  context: z.core.$RefinementCtx,
+): Quantity {
+  try {
+    return parseQuantity(typed, kind, { defaultUnit });
+  } catch (error) {
+    if (!(error instanceof EngineeringError)) throw error;
+    context.addIssue({ code: "custom", message: error.message, params: { code: error.code } });
+    return z.NEVER;
+  }
+}
+
+const numberForm = /^[+-]?\d+([.,]\d+)?$/;
 
 const number = z
   .string()
   .trim()
-  .regex(/^[+-]?\d+([.,]\d+)?$/, "Type a number.")
+  .regex(numberForm, "Type a number.")
   .transform((typed) => Number(typed.replace(",", ".")));
 
 /** A plain number between two bounds, comma or point. */
@@ -41,9 +55,15 @@ export const numberBetween = (least: number, most: number, message: string) =>
 export const wholeBetween = (least: number, most: number, message: string) =>
   number.pipe(z.number().int(message).min(least, message).max(most, message));
 
-/** The same, left blank where there is none. */
+/** A number between two bounds, left blank where there is none. */
 export const optionalNumber = (least: number, most: number, message: string) =>
-  z.union([z.literal("").transform(() => undefined), numberBetween(least, most, message)]).optional();
+  z
+    .string()
+    .trim()
+    .refine((typed) => typed === "" || numberForm.test(typed), "Type a number.")
+    .transform((typed) => (typed === "" ? undefined : Number(typed.replace(",", "."))))
+    .refine((value) => value === undefined || (value >= least && value <= most), message)
+    .optional();
 
 /** A form's fields by their names; a name that is there several times is a list. */
 export function fieldsOf(form: FormData): Record<string, string | string[]> {

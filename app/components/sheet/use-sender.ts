@@ -2,9 +2,16 @@ import { useEffect, useRef } from "react";
 import { useFetcher } from "react-router";
 import type { Entry, SheetStore } from "./sheet-store";
 
+/** What became of one box: refused ones come back with what was typed and why. */
+export interface BoxAnswer {
+  key: string;
+  readingId: string | null;
+  refused?: { typed: string; error: string };
+}
+
 /** What the sheet's action answers for each box that was sent. */
 export interface SheetAnswer {
-  results?: { key: string; readingId: string | null; error?: string }[];
+  results?: BoxAnswer[];
   /** The server did not answer; nothing of this was saved. */
   unreachable?: boolean;
 }
@@ -32,7 +39,9 @@ export function useSender(store: SheetStore, session: Record<string, string>): {
       store.returnToQueue(batch);
       return;
     }
-    for (const { key, readingId, error } of answer.results) store.settle(key, { readingId, error });
+    for (const { key, readingId, refused } of answer.results) {
+      store.settle(key, { readingId, error: refused?.error });
+    }
   }, [fetcher.state, fetcher.data, store]);
 
   useEffect(() => {

@@ -73,7 +73,7 @@ export async function saveBoxes(
     results.push({
       key,
       readingId: result.readingId,
-      ...(result.status === "refused" ? { error: result.message } : {}),
+      ...(result.status === "refused" ? { refused: { typed: text, error: result.message } } : {}),
     });
   }
   return { results };

@@ -26,14 +26,14 @@ interface SheetPanelProps {
   lastTemperature: string;
   lastGauges: { bore: string; journal: string };
   frozen: boolean;
-  /** What the server refused of a form that was sent without script. */
-  refused?: SheetAnswer["results"];
+  /** What the server answered to a form that was sent without script. */
+  answers?: SheetAnswer["results"];
 }
 
 /** The reading grid of one fit with all that goes along with it. Without script it is a form with a button. */
 export function SheetPanel(props: SheetPanelProps) {
   const { sheet, units, frozen, gauges } = props;
-  const [store] = useState(() => new SheetStore(withRefused(props.boxes, props.refused)));
+  const [store] = useState(() => new SheetStore(withRefused(props.boxes, props.answers)));
   const [session, setSession] = useState({
     fit: sheet.id,
     temperature: props.lastTemperature,
@@ -185,12 +185,22 @@ function rowOf(sheet: Sheet, active: SheetBox | string): SheetBox[] {
 }
 
 /** What was refused without script stands in its box again, with the reason. */
-function withRefused(boxes: [string, BoxState][], refused: SheetAnswer["results"]): [string, BoxState][] {
-  const reasons = new Map(refused?.map(({ key, error }) => [key, error]));
-  return boxes.map(([key, box]) => {
-    const error = reasons.get(key);
-    return [key, error ? { ...box, status: "refused", error } : box];
-  });
+function withRefused(
+  boxes: [string, BoxState][],
+  answers: SheetAnswer["results"] = [],
+): [string, BoxState][] {
+  const states = new Map(boxes);
+  for (const { key, readingId, refused } of answers) {
+    if (refused)
+      states.set(key, {
+        text: refused.typed,
+        error: refused.error,
+        readingId,
+        valuePm: null,
+        status: "refused",
+      });
+  }
+  return [...states];
 }
 
 function statusOf(store: SheetStore, unreachable: boolean, isScripted: boolean): string {

@@ -124,7 +124,7 @@ export default function SheetPage({ loaderData, actionData }: Route.ComponentPro
         lastTemperature={loaderData.lastTemperature}
         lastGauges={loaderData.lastGauges}
         frozen={loaderData.frozen}
-        refused={actionData && "results" in actionData ? actionData.results : undefined}
+        answers={actionData && "results" in actionData ? actionData.results : undefined}
       />
       {loaderData.signed && (
         <p className="mt-6">

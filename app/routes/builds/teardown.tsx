@@ -166,7 +166,7 @@ export default function Teardown({ loaderData, actionData }: Route.ComponentProp
         lastTemperature={loaderData.lastTemperature}
         lastGauges={loaderData.lastGauges}
         frozen={!loaderData.mayMeasure}
-        refused={actionData && "results" in actionData ? actionData.results : undefined}
+        answers={actionData && "results" in actionData ? actionData.results : undefined}
       />
       <section className="mt-9">
         <h2 className="mb-1 text-lg font-semibold">What the parts show</h2>

@@ -1,0 +1,139 @@
+import { z } from "zod";
+import { EngineeringError } from "~/engineering/engineering-error";
+import { formatWithUnit } from "~/engineering/quantity/format";
+import { parseQuantity, type Quantity } from "~/engineering/quantity/parse";
+import { type QuantityKind, toCore, type UnitName, unitsOf } from "~/engineering/quantity/units";
+
+/** Where a quantity may lie, in the core's units (SI; °C; mm²/s). */
+interface Limits {
+  /** It must be greater than this. */
+  over?: number;
+  least?: number;
+  most?: number;
+}
+
+/** A quantity that is kept as it was typed: text with its unit. */
+export const quantity = (kind: QuantityKind, limits: Limits = {}) =>
+  z
+    .unknown()
+    .transform((given, context): Quantity => {
+      if (typeof given !== "string") return refuse(context, notText(given, kind));
+      return orRefuse(context, () => within(parseQuantity(given, kind), limits));
+    })
+    .meta({ type: "string", ...described(kind, limits) });
+
+/** A quantity to reckon with, in the core's units: text with its unit, or as an answer of the API gave it. */
+export const amount = (kind: QuantityKind, limits: Limits = {}) =>
+  z
+    .unknown()
+    .transform((given, context): number => {
+      const answered = answeredQuantity.safeParse(given);
+      if (typeof given !== "string" && !answered.success) return refuse(context, notText(given, kind));
+      return orRefuse(context, () => {
+        const si = answered.success
+          ? coreOf(answered.data.si, kind)
+          : parseQuantity(given as string, kind).si;
+        return within({ kind, si }, limits).si;
+      });
+    })
+    .meta({ type: ["string", "object"], ...described(kind, limits) });
+
+const answeredQuantity = z.strictObject({ si: z.number(), text: z.string() });
+
+const coreOf = (si: number, kind: QuantityKind) => (kind === "kinematic-viscosity" ? toCore(si, "m2/s") : si);
+
+interface Fault {
+  code: string;
+  message: string;
+}
+
+function notText(given: unknown, kind: QuantityKind): Fault {
+  if (given === undefined) return { code: "missing", message: "This is missing." };
+  const like = `"${examples[kind]}"`;
+  if (typeof given === "number") {
+    return {
+      code: "no-unit",
+      message: `A bare number says no unit; send text with its unit, such as ${like}.`,
+    };
+  }
+  return { code: "wrong-type", message: `This must be text with its unit, such as ${like}.` };
+}
+
+function refuse(context: z.RefinementCtx, { code, message }: Fault): never {
+  context.addIssue({ code: "custom", message, params: { code } });
+  return z.NEVER;
+}
+
+function orRefuse<T>(context: z.RefinementCtx, work: () => T): T {
+  try {
+    return work();
+  } catch (error) {
+    if (!(error instanceof EngineeringError)) throw error;
+    return refuse(context, error);
+  }
+}
+
+function within<Q extends { si: number; kind: QuantityKind }>(quantity: Q, limits: Limits): Q {
+  const { si, kind } = quantity;
+  const { over, least, most } = limits;
+  const isIn = si > (over ?? -Infinity) && si >= (least ?? -Infinity) && si <= (most ?? Infinity);
+  if (isIn) return quantity;
+  throw new EngineeringError(
+    "out-of-range",
+    "value",
+    `This must be ${rangeText(kind, limits)}; look at the value and its unit.`,
+  );
+}
+
+function rangeText(kind: QuantityKind, { over, least, most }: Limits): string {
+  const text = (limit: number) => {
+    const [, number, label] = /^(\S+) (.*)$/.exec(formatWithUnit(limit, commonUnits[kind], 6)) ?? [];
+    return `${Number(number)} ${label}`;
+  };
+  const bounds = [
+    over === undefined ? "" : `over ${text(over)}`,
+    least === undefined ? "" : `at least ${text(least)}`,
+    most === undefined ? "" : `at most ${text(most)}`,
+  ];
+  return bounds.filter(Boolean).join(" and ");
+}
+
+function described(kind: QuantityKind, limits: Limits) {
+  const range = rangeText(kind, limits);
+  return {
+    description: `With its unit: ${unitsOf(kind).join(", ")}${range && `; ${range}`}.`,
+    examples: [examples[kind]],
+  };
+}
+
+const commonUnits: Record<QuantityKind, UnitName> = {
+  "small-length": "mm",
+  length: "mm",
+  finish: "um",
+  temperature: "degC",
+  pressure: "bar",
+  "dynamic-viscosity": "mPa s",
+  "kinematic-viscosity": "cSt",
+  speed: "rpm",
+  force: "N",
+  mass: "kg",
+  time: "h",
+  torque: "N m",
+  density: "kg/m3",
+};
+
+const examples: Record<QuantityKind, string> = {
+  "small-length": "25 tenths",
+  length: "2.1000 in",
+  finish: "8 uin",
+  temperature: "95 degC",
+  pressure: "60 psi",
+  "dynamic-viscosity": "12 mPa s",
+  "kinematic-viscosity": "16.2 cSt",
+  speed: "7200 rpm",
+  force: "12 kN",
+  mass: "520 g",
+  time: "6.5 h",
+  torque: "60 lbf ft",
+  density: "870 kg/m3",
+};

@@ -1,0 +1,205 @@
+import { z } from "zod";
+import { metres } from "~/engineering/quantity/length";
+import { absenceText } from "~/engineering/trade/box-text";
+import { findBuild, listTargets, type Target } from "~/models/build.server";
+import { type Fit, listFits } from "~/models/fit.server";
+import { type Gauge, listGauges } from "~/models/gauge.server";
+import { listReadings } from "~/models/reading.server";
+import { type FieldError, invalid, Refusal } from "~/models/refusal";
+import type { Scope } from "~/models/scope";
+import { recordEntry } from "~/models/sheet-entry.server";
+import { fieldErrors, sentenceOf } from "../frame/check";
+import { endpoint } from "../frame/endpoint";
+import { paged, pageOf, pageQuery } from "../frame/page";
+import { amount, quantity } from "../frame/quantity-in";
+import { quantityOut } from "../frame/quantity-out";
+import { line, name } from "./answers";
+import { positionOfEngine } from "./position-of-engine.server";
+
+const stages = z.enum(["assembly", "teardown"]);
+
+const box = {
+  feature: z.enum(["bore", "journal"]),
+  plane: z.enum(["front", "middle", "rear"]),
+  axis: z.enum(["vertical", "plus45", "minus45", "horizontal", "a", "b"]),
+};
+
+const partTemperature = amount("temperature", { least: -40, most: 200 });
+
+const reading = z
+  .strictObject({
+    fit: name,
+    position: z.int().min(1),
+    ...box,
+    value: quantity("length", { over: 0, most: 2 }).optional(),
+    temperature: partTemperature.optional(),
+    gauge: name.optional(),
+    repeat: z.int().min(1).max(20).default(1),
+    state: z.enum(["measured", "not-measured", "not-accessible"]).default("measured"),
+    reason: line(200).default(""),
+  })
+  .refine(({ state, value }) => (state === "measured") === (value !== undefined), {
+    path: ["value"],
+    error: "A measured reading has a value, and one that is not measured has none.",
+    params: { code: "value-and-state" },
+  })
+  .meta({ id: "NewReading" });
+
+type NewReading = z.output<typeof reading>;
+
+// One that is not so must not keep the others from being written down: it is refused by itself, with its index.
+const orRefused = z.unknown().transform((given): FieldError[] => {
+  const checked = reading.safeParse(given, { reportInput: true, error: sentenceOf });
+  return checked.success ? [] : fieldErrors(checked.error);
+});
+
+const warning = z.object({ code: z.string(), message: z.string() });
+
+const result = z.object({
+  index: z.int(),
+  status: z.enum(["accepted", "refused"]),
+  id: z.string().optional(),
+  warnings: z.array(warning).optional(),
+  errors: z.array(z.object({ path: z.string(), code: z.string(), message: z.string() })).optional(),
+});
+
+type Result = z.infer<typeof result>;
+
+export const postReadings = endpoint({
+  method: "POST",
+  path: "/builds/{build}/readings",
+  who: "reading:write",
+  title: "Writes readings down, each accepted or refused by itself",
+  about:
+    "Accepted means on disk. A value that looks like a slip is accepted with a warning; a second reading of the same place supersedes the first, which stays in the record. A place that was not measured says so in `state`.",
+  body: z.strictObject({
+    stage: stages,
+    readings: z
+      .array(z.union([reading, orRefused]))
+      .min(1)
+      .max(1000),
+  }),
+  answer: z.object({ results: z.array(result) }),
+  example: {
+    stage: "assembly",
+    readings: [
+      {
+        fit: "the id of a fit",
+        position: 1,
+        feature: "bore",
+        plane: "front",
+        axis: "vertical",
+        value: "2.1025 in",
+        temperature: "20.5 degC",
+      },
+    ],
+  },
+  handle: async ({ scope, params, body }) => {
+    const build = await findBuild(scope, params.build);
+    const [fits, targets, gauges] = await Promise.all([
+      listFits(scope, build.engine_id),
+      listTargets(scope, build.id),
+      listGauges(scope),
+    ]);
+    const sheet = { build, fits, targets, gauges, stage: body.stage };
+    const results: Result[] = [];
+    for (const [index, given] of body.readings.entries()) {
+      const what = Array.isArray(given) ? refused(given) : await writeDown(scope, sheet, given);
+      results.push({ index, ...what });
+    }
+    return { results };
+  },
+});
+
+const refused = (errors: FieldError[]) => ({ status: "refused" as const, errors });
+
+interface Sheet {
+  build: Awaited<ReturnType<typeof findBuild>>;
+  fits: Fit[];
+  targets: Target[];
+  gauges: Gauge[];
+  stage: z.infer<typeof stages>;
+}
+
+async function writeDown(scope: Scope, sheet: Sheet, given: NewReading): Promise<Omit<Result, "index">> {
+  try {
+    const { fit, position } = positionOfEngine(sheet.fits, given);
+    const { feature, plane, axis, repeat, state, value, temperature, gauge, reason } = given;
+    const aim = sheet.targets.find((target) => target.fitId === fit.id)?.aim_pm ?? fit.usual_pm;
+    const entry = {
+      box: { stage: sheet.stage, fitId: fit.id, positionId: position.id, feature, plane, axis, repeat },
+      typed: state === "measured" ? value!.typed : absenceText(state, reason),
+      // Every value of the API names its unit; this one is never taken.
+      defaultUnit: "in" as const,
+      temperatureC: temperature,
+      gaugeId: gauge === undefined ? undefined : gaugeOfShop(sheet.gauges, gauge),
+    };
+    const entered = await recordEntry(scope, sheet.build, fit, entry, aim);
+    if (entered.status === "refused") {
+      return refused([{ path: "value", code: entered.code, message: entered.message }]);
+    }
+    const warnings = entered.warnings.length > 0 ? { warnings: entered.warnings } : {};
+    return { status: "accepted", id: entered.readingId!, ...warnings };
+  } catch (error) {
+    if (!(error instanceof Refusal)) throw error;
+    return refused(
+      error.errors.length > 0 ? error.errors : [{ path: "", code: error.code, message: error.message }],
+    );
+  }
+}
+
+function gaugeOfShop(gauges: readonly Gauge[], id: string): string {
+  if (gauges.some((gauge) => gauge.id === id)) return id;
+  throw invalid({ path: "gauge", code: "unknown-gauge", message: "The shop has no such gauge." });
+}
+
+export const getReadings = endpoint({
+  method: "GET",
+  path: "/builds/{build}/readings",
+  who: "engine:read",
+  title: "Every reading of a build ever taken, oldest first; superseded ones are marked",
+  query: { ...pageQuery, stage: stages.optional() },
+  answer: paged(
+    z
+      .object({
+        id: z.string(),
+        stage: stages,
+        fit: z.string(),
+        position: z.int(),
+        ...box,
+        repeat: z.int(),
+        state: z.enum(["measured", "not-measured", "not-accessible", "withdrawn"]),
+        value: quantityOut.nullable(),
+        typed: z.string().meta({ description: "The value exactly as it was typed." }),
+        reason: z.string().nullable(),
+        temperature: quantityOut.nullable(),
+        gauge: z.string().nullable(),
+        warnings: z.array(warning),
+        superseded: z.boolean(),
+        takenAt: z.string(),
+      })
+      .meta({ id: "Reading" }),
+  ),
+  handle: async ({ scope, params, query, say }) => {
+    const build = await findBuild(scope, params.build);
+    return pageOf(await listReadings(scope, build.id, query.stage), query, (row) => ({
+      id: row.id,
+      stage: row.stage,
+      fit: row.fitId,
+      position: row.position,
+      feature: row.feature,
+      plane: row.plane,
+      axis: row.axis,
+      repeat: row.repeat,
+      state: row.state,
+      value: row.valuePm === null ? null : say.length(metres(row.valuePm)),
+      typed: row.typed,
+      reason: row.reason,
+      temperature: row.temperatureC === null ? null : say.temperature(row.temperatureC),
+      gauge: row.gaugeId,
+      warnings: JSON.parse(row.warningsJson) as z.infer<typeof warning>[],
+      superseded: row.superseded,
+      takenAt: row.takenAt,
+    }));
+  },
+});

@@ -1,7 +1,7 @@
 import { requireWithin } from "../cycle/sound-input";
 import { risingRoot } from "./false-position";
 import { films, lengthToDiameters, opennesses } from "./film-table.generated";
-import { monotoneCurve, valueAt } from "./monotone-curve";
+import { monotoneCurve, spotAt, valueAt } from "./monotone-curve";
 import { type FilmSolution, frictionOf } from "./reynolds";
 
 /** Limits of the table; both ends are in it. */
@@ -38,21 +38,22 @@ export function filmCurves(lengthOverDiameter: number): FilmCurves {
   const loadAt = (eccentricityRatio: number) =>
     eccentricityRatio *
     closedCapacity(eccentricityRatio, lengthToDiameter) *
-    Math.exp(valueAt(capacity, openness(eccentricityRatio)));
+    Math.exp(valueAt(capacity, spotAt(opennesses, openness(eccentricityRatio))));
   const most = tableRange.eccentricityRatio.to;
   const heaviest = loadAt(most);
 
   const filmAt = (eccentricityRatio: number, sommerfeld: number, outsideRange: boolean): TableFilm => {
     const open = openness(eccentricityRatio);
-    const angle = valueAt(attitude, open);
+    const spot = spotAt(opennesses, open);
+    const angle = valueAt(attitude, spot);
     return {
       eccentricityRatio,
       sommerfeld,
       attitude: angle,
       friction: frictionOf(eccentricityRatio, sommerfeld, angle),
-      inflow: valueAt(inflow, open),
-      sideFlow: eccentricityRatio * valueAt(sideFlow, open),
-      peakPressure: valueAt(peak, open) / open,
+      inflow: valueAt(inflow, spot),
+      sideFlow: eccentricityRatio * valueAt(sideFlow, spot),
+      peakPressure: valueAt(peak, spot) / open,
       outsideRange,
     };
   };
@@ -76,8 +77,8 @@ const openness = (eccentricityRatio: number) => Math.sqrt(1 - eccentricityRatio)
 
 /** The table's five quantities over openness, rising, at one L/D; the first as what `closedCapacity` lacks of it. */
 function curvesFor(lengthToDiameter: number) {
-  const place = Math.log(lengthToDiameter);
-  const nodes = (quantity: number) => overLength[quantity]!.map((curve) => valueAt(curve, place));
+  const spot = spotAt(logLengths, Math.log(lengthToDiameter));
+  const nodes = (quantity: number) => overLength[quantity]!.map((curve) => valueAt(curve, spot));
   const lacking = nodes(0).map(
     (value, node) => value - Math.log(closedCapacity(1 - opennesses[node]! ** 2, lengthToDiameter)),
   );
@@ -90,11 +91,13 @@ function curvesFor(lengthToDiameter: number) {
   };
 }
 
+const logLengths = lengthToDiameters.map(Math.log);
+
 /** By quantity and openness, the curve over the logarithm of L/D. */
 const overLength = films[0]!.map((_, quantity) =>
   opennesses.map((_, node) =>
     monotoneCurve(
-      lengthToDiameters.map(Math.log),
+      logLengths,
       films.map((film) => film[quantity]![node]! / 1e5),
     ),
   ),

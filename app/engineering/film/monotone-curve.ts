@@ -1,6 +1,5 @@
 /** A curve through points that rises and falls only where they do, with a smooth slope. */
 export interface MonotoneCurve {
-  places: ArrayLike<number>;
   values: ArrayLike<number>;
   slopes: Float64Array;
 }
@@ -25,7 +24,7 @@ export function monotoneCurve(places: ArrayLike<number>, values: ArrayLike<numbe
     const other = step(i) + 2 * step(i - 1);
     slopes[i] = (weight + other) / (weight / before + other / after);
   }
-  return { places, values, slopes };
+  return { values, slopes };
 }
 
 function endSlope(step: number, nextStep: number, rise: number, nextRise: number): number {
@@ -34,20 +33,43 @@ function endSlope(step: number, nextStep: number, rise: number, nextRise: number
   return rise * nextRise <= 0 && Math.abs(slope) > 3 * Math.abs(rise) ? 3 * rise : slope;
 }
 
-/** The curve's value at a place between its first and last. */
-export function valueAt({ places, values, slopes }: MonotoneCurve, place: number): number {
-  let low = 0;
-  let high = places.length - 1;
-  while (high - low > 1) {
-    const middle = (low + high) >> 1;
-    if (places[middle]! <= place) low = middle;
-    else high = middle;
+/** A place between the points that several curves share: the point before it, and what each end counts there. */
+export interface Spot {
+  before: number;
+  valueBefore: number;
+  valueAfter: number;
+  slopeBefore: number;
+  slopeAfter: number;
+}
+
+/** Finds a place, from the first point to the last, once for all curves over the same places. */
+export function spotAt(places: ArrayLike<number>, place: number): Spot {
+  let before = 0;
+  let after = places.length - 1;
+  while (after - before > 1) {
+    const middle = (before + after) >> 1;
+    if (places[middle]! <= place) before = middle;
+    else after = middle;
   }
-  const step = places[high]! - places[low]!;
-  const part = (place - places[low]!) / step;
+  const step = places[after]! - places[before]!;
+  const part = (place - places[before]!) / step;
   const rest = 1 - part;
+  return {
+    before,
+    valueBefore: rest * rest * (1 + 2 * part),
+    valueAfter: part * part * (1 + 2 * rest),
+    slopeBefore: rest * rest * part * step,
+    slopeAfter: -part * part * rest * step,
+  };
+}
+
+/** A curve's value at a spot of its places. */
+export function valueAt({ values, slopes }: MonotoneCurve, spot: Spot): number {
+  const { before } = spot;
   return (
-    rest * rest * ((1 + 2 * part) * values[low]! + part * step * slopes[low]!) +
-    part * part * ((1 + 2 * rest) * values[high]! - rest * step * slopes[high]!)
+    spot.valueBefore * values[before]! +
+    spot.valueAfter * values[before + 1]! +
+    spot.slopeBefore * slopes[before]! +
+    spot.slopeAfter * slopes[before + 1]!
   );
 }

@@ -2,24 +2,9 @@ import { type FocusEvent, type KeyboardEvent, useRef } from "react";
 import type { Station } from "~/engineering/trade/fit-kinds";
 import { stationName } from "~/engineering/trade/fit-kinds";
 import { neighbour, type SheetBox, type SheetPosition, sheetRows, type Travel, travelOrder } from "./boxes";
+import type { RowFigures, TypedBox } from "./judgement";
 import { SheetRow } from "./sheet-row";
 import type { SheetStore } from "./sheet-store";
-
-/** What reading a box's text gives; the page decides by the core's rules. */
-export interface TypedBox {
-  valuePm: number | null;
-  error?: string;
-  warning?: { message: string; suggestion?: string };
-}
-
-/** A row's computed figures, as they stand in its last columns. */
-export interface RowFigures {
-  vertical: string;
-  taper: string;
-  outOfRound: string;
-  uncertainty: string;
-  window: { word: string; tone: "ok" | "watch" | "stop" | "none" };
-}
 
 export interface SheetGridProps {
   label: string;

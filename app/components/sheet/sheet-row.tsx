@@ -1,7 +1,7 @@
 import { memo, useEffect, useRef, useSyncExternalStore } from "react";
 import { stationName } from "~/engineering/trade/fit-kinds";
 import type { SheetBox } from "./boxes";
-import type { RowFigures } from "./sheet-grid";
+import type { RowFigures } from "./judgement";
 import type { BoxState, SheetStore } from "./sheet-store";
 
 interface SheetRowProps {

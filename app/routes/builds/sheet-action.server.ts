@@ -1,11 +1,11 @@
 import { z } from "zod";
-import type { Stage } from "#database/schema";
 import { readBoxKey } from "~/components/sheet/boxes";
 import type { SheetAnswer } from "~/components/sheet/use-sender";
 import { diameterUnitName, type PageUnits } from "~/engineering/quantity/figures";
 import { type Build, listTargets } from "~/models/build.server";
 import { findFit } from "~/models/fit.server";
 import { listGauges } from "~/models/gauge.server";
+import type { Box } from "~/models/reading.server";
 import { invalid } from "~/models/refusal";
 import type { Scope } from "~/models/scope";
 import { recordEntry } from "~/models/sheet-entry.server";
@@ -35,7 +35,7 @@ export async function saveBoxes(
   scope: Scope,
   units: PageUnits,
   build: Build,
-  stage: Stage,
+  stage: Box["stage"],
   form: FormData,
 ): Promise<SheetAnswer> {
   const typed = session.safeParse(Object.fromEntries(form));

@@ -1,6 +1,6 @@
 import type { SheetBox } from "~/components/sheet/boxes";
 import { boxKey } from "~/components/sheet/boxes";
-import type { RowFigures, TypedBox } from "~/components/sheet/sheet-grid";
+import type { RowFigures, TypedBox } from "~/components/sheet/judgement";
 import { type PositionClearance, positionClearance } from "~/engineering/clearance/position-clearance";
 import { againstWindow, type WindowPlace } from "~/engineering/clearance/window";
 import { EngineeringError } from "~/engineering/engineering-error";

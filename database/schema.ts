@@ -338,8 +338,9 @@ export interface IdempotencyTable {
   person_id: Fixed<string>;
   key: Fixed<string>;
   request_hash: Fixed<string>;
-  status: Fixed<number>;
-  answer_json: Fixed<string>;
+  /** 0 while the request has no answer yet. */
+  status: number;
+  answer_json: string;
   created_at: Fixed<Instant>;
 }
 

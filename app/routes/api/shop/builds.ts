@@ -2,6 +2,7 @@ import { z } from "zod";
 import { metres } from "~/engineering/quantity/length";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findBuild, insertBuild, listTargets } from "~/models/build.server";
+import { findEngine } from "~/models/engine.server";
 import { listFits } from "~/models/fit.server";
 import { countStanding } from "~/models/reading.server";
 import { listRuns } from "~/models/run.server";
@@ -92,6 +93,8 @@ export const postBuild = endpoint({
   answer: buildAnswer,
   example: { oil: "Oil A", note: "New shells on all big ends." },
   handle: async ({ scope, params, body, say }) => {
+    // First the engine: who may not know of it learns nothing of the oil either.
+    await findEngine(scope, params.engine);
     const oilId = body.oil === undefined ? undefined : await oilOfShop(scope, body.oil);
     return sayBuild(scope, await insertBuild(scope, params.engine, { oilId, note: body.note }), say);
   },

@@ -52,7 +52,11 @@ test("what is missing is said, and what can be given is given", () => {
   const half = positionClearance({ bore: [bore("front", "vertical", 2.1025)], journal: [] });
   expect(half.bore).toBeCloseTo(2.1025 * inch, 12);
   expect(half.vertical).toBeUndefined();
-  expect(half.missing).toEqual(["No journal is measured."]);
+  expect(half.missing).toEqual([
+    "The bore is measured in one direction only: its out-of-round is not known.",
+    "The bore is not measured front and rear on one axis: its taper is not known.",
+    "No journal is measured.",
+  ]);
   expect(half.at20).toBe(false);
 });
 

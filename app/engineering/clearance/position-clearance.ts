@@ -1,12 +1,5 @@
-import { EngineeringError } from "../engineering-error";
-import { at20 } from "../temperature/expansion";
-import type { Station } from "../trade/fit-kinds";
-
-/** One reading of a bore or a journal, m. */
-export interface DiameterReading extends Pick<Station, "plane" | "axis"> {
-  value: number;
-  temperatureC?: number | undefined;
-}
+import { type PartShape, partShape, type Shape } from "./part-shape";
+import { type DiameterReading, meanOf, type StationMean, stationMeans } from "./station-means";
 
 export interface PositionReadings {
   bore: readonly DiameterReading[];
@@ -24,6 +17,7 @@ export interface PositionClearance {
   least?: number;
   most?: number;
   mean?: number;
+  /** Mean diameters. */
   bore?: number;
   journal?: number;
   boreOutOfRound?: number;
@@ -37,118 +31,103 @@ export interface PositionClearance {
   at20: boolean;
   /** The bore is smaller than the journal somewhere. */
   interference: boolean;
+  /** What was not measured, and what is therefore not known. */
   missing: string[];
 }
 
-export type Shape = "barrel" | "hourglass" | "even";
-
 /**
  * Clearance of one position from any grid of readings. Repeats at one station are averaged first; every diameter is
- * brought to 20 °C where its temperature and expansion are known (ISO 1). A journal turns, so that the load line meets
- * all of it in turn: the vertical clearance takes the mean of the journal's axes, the least its largest.
+ * brought to 20 °C where its temperature and expansion are known (ISO 1).
+ *
+ * A journal turns, so that the load line meets all of it in turn: the vertical clearance takes the mean of the
+ * journal's axes, in the same plane where both are measured there; the least clearance takes its largest reading.
+ *
+ * Absolute and comparative measuring give the same sum: a bore gauge that was zeroed on the journal's micrometer
+ * setting shows the clearance, and the bore is written as that setting with what the dial added. They differ in their
+ * uncertainty (`clearanceUncertainty`).
  * @throws EngineeringError `not-positive` for a diameter that is not over zero, `outside-range` for a temperature
  */
 export function positionClearance(readings: PositionReadings): PositionClearance {
-  const bore = stations(readings.bore, readings.boreExpansion, "bore");
-  const journal = stations(readings.journal, readings.journalExpansion, "journal");
-  const result: PositionClearance = {
-    at20: bore.every((station) => station.at20) && journal.every((station) => station.at20),
-    interference: false,
-    missing: [],
-  };
-  if (bore.length === 0) result.missing.push("No bore is measured.");
-  if (journal.length === 0) result.missing.push("No journal is measured.");
-  Object.assign(result, shapeOf("bore", bore), shapeOf("journal", journal));
-  if (bore.length === 0 || journal.length === 0) return result;
-
-  const boreValues = bore.map((station) => station.value);
-  const journalValues = journal.map((station) => station.value);
-  result.least = Math.min(...boreValues) - Math.max(...journalValues);
-  result.most = Math.max(...boreValues) - Math.min(...journalValues);
-  result.mean = mean(boreValues) - mean(journalValues);
-  result.interference = result.least < 0;
-  const loadLine = bore.filter((station) => station.axis === "vertical");
-  // A guide has no load line that anyone marks: its two directions stand for it.
-  const onLine =
-    loadLine.length > 0 ? loadLine : bore.filter((station) => station.axis === "a" || station.axis === "b");
-  if (onLine.length > 0) result.vertical = mean(onLine.map((station) => station.value)) - mean(journalValues);
-  else result.missing.push("The bore is not measured across the load line (vertical).");
-  return result;
-}
-
-interface StationMean extends Pick<Station, "plane" | "axis"> {
-  value: number;
-  at20: boolean;
-}
-
-function stations(
-  readings: readonly DiameterReading[],
-  expansion: number | undefined,
-  field: string,
-): StationMean[] {
-  const byStation = new Map<
-    string,
-    { place: Pick<Station, "plane" | "axis">; values: number[]; at20: boolean }
-  >();
-  for (const [index, { plane, axis, value, temperatureC }] of readings.entries()) {
-    if (!(value > 0 && Number.isFinite(value))) {
-      throw new EngineeringError("not-positive", `${field}[${index}].value`, "A diameter is over zero.");
-    }
-    const known = temperatureC !== undefined && expansion !== undefined;
-    const key = `${plane} ${axis}`;
-    const station = byStation.get(key) ?? { place: { plane, axis }, values: [], at20: true };
-    station.values.push(known ? at20(value, temperatureC, expansion) : value);
-    station.at20 &&= known;
-    byStation.set(key, station);
-  }
-  return [...byStation.values()].map(({ place, values, at20 }) => ({ ...place, value: mean(values), at20 }));
-}
-
-function shapeOf(feature: "bore" | "journal", measured: StationMean[]) {
-  if (measured.length === 0) return {};
-  const planes = ["front", "middle", "rear"] as const;
-  const values = new Map(
-    planes.map((plane) => [plane, measured.filter((station) => station.plane === plane).map((s) => s.value)]),
-  );
-  const spreads = [...values.values()]
-    .filter((list) => list.length > 1)
-    .map((list) => Math.max(...list) - Math.min(...list));
-  const taper = planeDifference(measured, "front", "rear");
-  const front = values.get("front")!;
-  const middle = values.get("middle")!;
-  const rear = values.get("rear")!;
+  const bore = stationMeans(readings.bore, readings.boreExpansion, "bore");
+  const journal = stationMeans(readings.journal, readings.journalExpansion, "journal");
+  const boreShape = partShape(bore);
+  const journalShape = partShape(journal);
+  const vertical = verticalClearance(bore, journal);
+  const extremes = extremeClearances(bore, journal);
   return {
-    [feature]: mean(measured.map((station) => station.value)),
-    ...(spreads.length > 0 ? { [`${feature}OutOfRound`]: Math.max(...spreads) } : {}),
-    ...(taper === undefined ? {} : { [`${feature}Taper`]: taper }),
-    ...(front.length > 0 && middle.length > 0 && rear.length > 0
-      ? { [`${feature}Shape`]: shape(mean(front), mean(middle), mean(rear)) }
-      : {}),
+    ...(vertical !== undefined && { vertical }),
+    ...extremes,
+    ...(bore.length > 0 && { bore: meanOf(bore) }),
+    ...(journal.length > 0 && { journal: meanOf(journal) }),
+    ...named("bore", boreShape),
+    ...named("journal", journalShape),
+    at20: [...bore, ...journal].every((station) => station.at20),
+    interference: (extremes.least ?? 0) < 0,
+    missing: [
+      ...missingOf("bore", bore, boreShape),
+      ...missingOf("journal", journal, journalShape),
+      ...(bore.length > 0 && loadLine(bore).length === 0
+        ? ["The bore is not measured across the load line (vertical)."]
+        : []),
+    ],
   };
 }
 
-/** Mean difference of two planes over the axes that both have, so that out-of-round does not pass for taper. */
-function planeDifference(
-  measured: StationMean[],
-  one: Station["plane"],
-  other: Station["plane"],
+function named(feature: "bore" | "journal", { outOfRound, taper, shape }: PartShape) {
+  return {
+    ...(outOfRound !== undefined && { [`${feature}OutOfRound`]: outOfRound }),
+    ...(taper !== undefined && { [`${feature}Taper`]: taper }),
+    ...(shape && { [`${feature}Shape`]: shape }),
+  };
+}
+
+function extremeClearances(
+  bore: readonly StationMean[],
+  journal: readonly StationMean[],
+): Pick<PositionClearance, "least" | "most" | "mean"> {
+  if (bore.length === 0 || journal.length === 0) return {};
+  const bores = bore.map(({ value }) => value);
+  const journals = journal.map(({ value }) => value);
+  return {
+    least: Math.min(...bores) - Math.max(...journals),
+    most: Math.max(...bores) - Math.min(...journals),
+    mean: meanOf(bore) - meanOf(journal),
+  };
+}
+
+/** The bore's stations across the load line. A guide has none that anyone marks: its two directions stand for it. */
+function loadLine(bore: readonly StationMean[]): StationMean[] {
+  const vertical = bore.filter(({ axis }) => axis === "vertical");
+  return vertical.length > 0 ? vertical : bore.filter(({ axis }) => axis === "a" || axis === "b");
+}
+
+function verticalClearance(
+  bore: readonly StationMean[],
+  journal: readonly StationMean[],
 ): number | undefined {
-  const differences = measured
-    .filter((station) => station.plane === one)
-    .flatMap((station) => {
-      const opposite = measured.find(
-        (candidate) => candidate.plane === other && candidate.axis === station.axis,
-      );
-      return opposite ? [station.value - opposite.value] : [];
-    });
-  return differences.length > 0 ? mean(differences) : undefined;
+  const across = loadLine(bore);
+  if (across.length === 0 || journal.length === 0) return undefined;
+  const planes = (["front", "middle", "rear"] as const).flatMap((plane) => {
+    const bores = across.filter((station) => station.plane === plane);
+    const journals = journal.filter((station) => station.plane === plane);
+    return bores.length > 0 && journals.length > 0 ? [meanOf(bores) - meanOf(journals)] : [];
+  });
+  if (planes.length === 0) return meanOf(across) - meanOf(journal);
+  return planes.reduce((sum, clearance) => sum + clearance, 0) / planes.length;
 }
 
-function shape(front: number, middle: number, rear: number): Shape {
-  if (middle > Math.max(front, rear)) return "barrel";
-  return middle < Math.min(front, rear) ? "hourglass" : "even";
-}
-
-function mean(values: readonly number[]): number {
-  return values.reduce((sum, value) => sum + value, 0) / values.length;
+function missingOf(
+  part: "bore" | "journal",
+  stations: readonly StationMean[],
+  { outOfRound, taper }: PartShape,
+): string[] {
+  if (stations.length === 0) return [`No ${part} is measured.`];
+  return [
+    ...(outOfRound === undefined
+      ? [`The ${part} is measured in one direction only: its out-of-round is not known.`]
+      : []),
+    ...(taper === undefined
+      ? [`The ${part} is not measured front and rear on one axis: its taper is not known.`]
+      : []),
+  ];
 }

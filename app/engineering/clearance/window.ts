@@ -22,8 +22,3 @@ export function againstWindow(
   if (clearance < window.least - same) return "under";
   return clearance > window.most + same ? "over" : "inside";
 }
-
-/** How far the clearances of a fit's positions lie apart, m; `undefined` for fewer than two. */
-export function spread(clearances: readonly number[]): number | undefined {
-  return clearances.length < 2 ? undefined : Math.max(...clearances) - Math.min(...clearances);
-}

@@ -1,4 +1,6 @@
+import { EngineeringError } from "../engineering-error";
 import { type BudgetLine, combine, rectangular, type Uncertainty } from "./budget";
+import { pooled, repeatabilityOf } from "./repeatability";
 
 /** What is known of a gauge: the step it shows, and the standard uncertainties of its calibration and repeats, m. */
 export interface GaugeSpecification {
@@ -23,15 +25,23 @@ export interface ClearanceUncertaintyInput {
   temperatureOffset?: number | undefined;
   /** How many readings of the bore and of the journal the clearance is a mean of. */
   readings?: { bore: number; journal: number } | undefined;
+  /** Readings that were repeated at one station, a group for each, m: they tell of the gauge's scatter of the day. */
+  repeats?: { bore: readonly (readonly number[])[]; journal: readonly (readonly number[])[] } | undefined;
 }
 
-/** A thermometer and a part's own unevenness in a shop: ± 0.5 °C after soaking (common practice). */
+/** A thermometer and a part's own unevenness in a shop: ± 0.5 °C after soaking (common practice, no source). */
 const temperatureHalfWidth = 0.5;
 
-/** Parts measured at an unknown temperature lie somewhere in a shop's day: 20 ± 5 °C (common practice). */
+/** What bore and journal, soaked side by side, may differ by: ± 0.1 °C (common practice, no source). */
+const differenceHalfWidth = 0.1;
+
+/** Parts measured at an unknown temperature lie somewhere in a shop's day: 20 ± 5 °C (common practice, no source). */
 const unknownTemperatureHalfWidth = 5;
 
-/** A gauge that nobody has described: what its last digit allows, a tenth of a thou, and repeats like it. */
+/** Two people with three trials on two parts or so: what a small shop knows of its gauges (a guess, on purpose low). */
+const usualDegreesOfFreedom = 10;
+
+/** A gauge that nobody has described: it shows a tenth of a thou, and is off and repeats by half of that. */
 export const unknownGauge: GaugeSpecification = {
   resolution: 2.54e-6,
   calibration: 1.27e-6,
@@ -40,36 +50,62 @@ export const unknownGauge: GaugeSpecification = {
 
 /**
  * Uncertainty of a diametral clearance (JCGM 100:2008): resolution of both gauges as rectangular, calibration,
- * repeatability, the parts' difference in temperature, and what their expansions are not known to.
- * Comparative measuring cancels the micrometer's calibration: its setting is both the journal's size and the gauge's zero.
+ * repeatability, the parts' temperatures, and what their expansions are not known to.
+ *
+ * Comparative measuring cancels the micrometer's calibration, as its setting is both the journal's size and the
+ * gauge's zero; how well it was set, its step and its scatter, still counts.
+ * @throws EngineeringError `negative` or `not-positive` for figures that no gauge or part has
  */
 export function clearanceUncertainty(input: ClearanceUncertaintyInput): Uncertainty {
-  const { boreGauge, journalGauge, method, nominal } = input;
-  const readings = input.readings ?? { bore: 1, journal: 1 };
-  const lines: BudgetLine[] = [
-    line("resolution of the bore gauge", rectangular(boreGauge.resolution / 2)),
-    line("resolution of the journal gauge", rectangular(journalGauge.resolution / 2)),
-    line("calibration of the bore gauge", boreGauge.calibration),
-    ...(method === "absolute" ? [line("calibration of the journal gauge", journalGauge.calibration)] : []),
-    repeatability("repeatability of the bore gauge", boreGauge, readings.bore),
-    repeatability("repeatability of the journal gauge", journalGauge, readings.journal),
+  const { boreGauge, journalGauge, method, nominal, readings, repeats } = input;
+  refuseUnsound(input);
+  return combine([
+    { what: "resolution of the bore gauge", uncertainty: rectangular(boreGauge.resolution / 2) },
+    { what: "resolution of the journal gauge", uncertainty: rectangular(journalGauge.resolution / 2) },
+    { what: "calibration of the bore gauge", uncertainty: boreGauge.calibration },
+    ...(method === "absolute"
+      ? [{ what: "calibration of the journal gauge", uncertainty: journalGauge.calibration }]
+      : []),
+    repeatabilityLine("repeatability of the bore gauge", boreGauge, readings?.bore, repeats?.bore),
+    repeatabilityLine(
+      "repeatability of the journal gauge",
+      journalGauge,
+      readings?.journal,
+      repeats?.journal,
+    ),
     ...temperatureLines(input, nominal),
-  ];
-  return combine(lines);
+  ]);
 }
 
-const line = (what: string, uncertainty: number): BudgetLine => ({
-  what,
-  uncertainty,
-  degreesOfFreedom: Number.POSITIVE_INFINITY,
-});
+function refuseUnsound({ nominal, temperatureOffset = 0, ...input }: ClearanceUncertaintyInput): void {
+  if (!(nominal > 0 && Number.isFinite(nominal))) {
+    throw new EngineeringError("not-positive", "nominal", "A fit has a diameter over zero.");
+  }
+  if (!Number.isFinite(temperatureOffset)) {
+    throw new EngineeringError("not-a-number", "temperatureOffset", "This temperature is no number.");
+  }
+  for (const gauge of ["boreGauge", "journalGauge"] as const) {
+    for (const figure of ["resolution", "calibration", "repeatability"] as const) {
+      const value = input[gauge][figure];
+      if (value >= 0 && Number.isFinite(value)) continue;
+      throw new EngineeringError("negative", `${gauge}.${figure}`, `A gauge's ${figure} is zero or more.`);
+    }
+  }
+}
 
-function repeatability(what: string, gauge: GaugeSpecification, readings: number): BudgetLine {
-  return {
-    what,
-    uncertainty: gauge.repeatability / Math.sqrt(Math.max(1, readings)),
-    degreesOfFreedom: gauge.repeatabilityDegreesOfFreedom ?? 10,
+function repeatabilityLine(
+  what: string,
+  gauge: GaugeSpecification,
+  readings = 1,
+  repeats: readonly (readonly number[])[] = [],
+): BudgetLine {
+  const study = {
+    standardDeviation: gauge.repeatability,
+    degreesOfFreedom: gauge.repeatabilityDegreesOfFreedom ?? usualDegreesOfFreedom,
   };
+  const today = repeatabilityOf(repeats);
+  const { standardDeviation, degreesOfFreedom } = today ? pooled(study, today) : study;
+  return { what, uncertainty: standardDeviation / Math.sqrt(Math.max(1, readings)), degreesOfFreedom };
 }
 
 function temperatureLines(input: ClearanceUncertaintyInput, nominal: number): BudgetLine[] {
@@ -78,18 +114,17 @@ function temperatureLines(input: ClearanceUncertaintyInput, nominal: number): Bu
   // Bore and journal soak together, so a common error counts with the difference of their expansions,
   // and each one's own unevenness with its own.
   const common = temperatureOffset === undefined ? unknownTemperatureHalfWidth : temperatureHalfWidth;
-  const own = rectangular(temperatureHalfWidth / 5);
-  const offset = Math.abs(temperatureOffset ?? 0);
+  const offset = Math.abs(temperatureOffset ?? rectangular(unknownTemperatureHalfWidth));
   return [
-    line(
-      "temperature of both parts",
-      nominal * Math.abs(bore.expansion - journal.expansion) * rectangular(common),
-    ),
-    line(
-      "difference in temperature of the parts",
-      nominal * Math.hypot(bore.expansion, journal.expansion) * own,
-    ),
-    line("expansion of the bore", nominal * offset * bore.uncertainty),
-    line("expansion of the journal", nominal * offset * journal.uncertainty),
+    {
+      what: "temperature of both parts",
+      uncertainty: nominal * Math.abs(bore.expansion - journal.expansion) * rectangular(common),
+    },
+    {
+      what: "difference in temperature of the parts",
+      uncertainty: nominal * Math.hypot(bore.expansion, journal.expansion) * rectangular(differenceHalfWidth),
+    },
+    { what: "expansion of the bore", uncertainty: nominal * offset * bore.uncertainty },
+    { what: "expansion of the journal", uncertainty: nominal * offset * journal.uncertainty },
   ];
 }

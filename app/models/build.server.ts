@@ -174,6 +174,19 @@ const stateWords: Record<BuildState, string> = {
   reviewed: "reviewed",
 };
 
+const moveWords: Record<BuildState, string> = {
+  measuring: "started",
+  assembled: "assembled",
+  running: "ran",
+  "torn-down": "tore down",
+  reviewed: "closed the review of",
+};
+
+/** A step round the loop as the history says it: "tore down build 7". */
+export function moveInWords(build: number, to: BuildState): string {
+  return `${moveWords[to]} build ${build}`;
+}
+
 /** Whether a build may go from one state to another. */
 export function mayGo(from: BuildState, to: BuildState): boolean {
   return nextStates[from].includes(to);
@@ -218,7 +231,7 @@ export async function moveBuild(
     engineId: build.engine_id,
     subjectKind: "build",
     subjectId: build.id,
-    what: `build ${build.number} is ${stateWords[to]}`,
+    what: moveInWords(build.number, to),
     from: build.state,
     to,
   });

@@ -1,8 +1,8 @@
 import type { Selectable } from "kysely";
 import type { BuildState, FitTable, Role } from "#database/schema";
 import type { Iteration } from "~/engineering/next-step/types";
-import { inWords } from "~/engineering/trade/condition";
 import type { FitKind } from "~/engineering/trade/fit-kinds";
+import { moveInWords } from "~/models/build.server";
 import type { Fit } from "~/models/fit.server";
 import type { Gauge } from "~/models/gauge.server";
 import type { ShopRules } from "~/models/shop.server";
@@ -108,6 +108,6 @@ export function noteMove(
   build: Pick<DemoBuild, "id" | "number">,
   [from, to]: readonly [BuildState, BuildState],
 ): void {
-  const what = `build ${build.number} is ${inWords(to)}`;
+  const what = moveInWords(build.number, to);
   noteHistory(bench, at, personId, { subjectKind: "build", subjectId: build.id, what, from, to });
 }

@@ -143,7 +143,7 @@ const builds = [
     CHECK ((state = 'measured') = (value_pm IS NOT NULL))
   ) STRICT`,
   "CREATE INDEX reading_of_build ON reading (build_id, stage, fit_id)",
-  "CREATE INDEX reading_of_fit ON reading (fit_id, build_id)",
+  "CREATE INDEX reading_of_fit ON reading (fit_id, taken_at)",
   // A box starts once; every later value names the one it takes the place of, so two people cannot both win.
   `CREATE UNIQUE INDEX reading_first_of_box ON reading
     (build_id, stage, position_id, feature, plane, axis, repeat) WHERE supersedes_id IS NULL`,
@@ -178,7 +178,7 @@ const builds = [
     person_id TEXT NOT NULL REFERENCES person (id), ${at("found_at")}
   ) STRICT`,
   `CREATE UNIQUE INDEX finding_first_of_position ON finding (build_id, position_id) WHERE supersedes_id IS NULL`,
-  "CREATE INDEX finding_of_fit ON finding (fit_id, build_id)",
+  "CREATE INDEX finding_of_fit ON finding (fit_id, found_at)",
   `CREATE TRIGGER finding_after_signature BEFORE INSERT ON finding
    WHEN EXISTS (SELECT 1 FROM sheet_signature s WHERE s.build_id = NEW.build_id AND s.stage = 'teardown')
    BEGIN SELECT RAISE(ABORT, 'the sheet is signed'); END`,

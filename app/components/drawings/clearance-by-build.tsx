@@ -154,7 +154,7 @@ export function ClearanceByBuild({ title, units, builds }: ClearanceByBuildProps
         );
       })}
       <path d={`M${left} ${top}V${floor}H${width - 10}`} fill="none" stroke="var(--line-strong)" />
-      <text x={left} y={top - 26} fontSize="11" fill="var(--mute)">
+      <text x={0} y={12} fontSize="11" fill="var(--mute)">
         clearance, {clearanceUnit(units)}
       </text>
     </Drawing>

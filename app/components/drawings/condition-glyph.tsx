@@ -64,6 +64,7 @@ export function GlyphShape({ grade, x, y, radius }: GlyphShapeProps) {
 export function ConditionGlyph({ grade, size = 28 }: { grade: number; size?: number }) {
   return (
     <svg
+      className="shrink-0"
       role="img"
       aria-label={`grade ${grade}, ${conditionGrades[grade]}`}
       width={size}

@@ -46,7 +46,7 @@ function waitingFor(build: BuildInHand): Waiting {
         say:
           left > 0
             ? `${left} of ${build.boxesDue} boxes to measure.`
-            : "Everything is measured; the sheet waits for its signature.",
+            : "everything is measured; the sheet waits for its signature.",
         detail: "Assembly sheet",
         permission: "reading:write",
         button: left > 0 ? "Go on measuring" : "Sign the sheet",
@@ -57,7 +57,7 @@ function waitingFor(build: BuildInHand): Waiting {
     case "running":
       return {
         ...open,
-        say: build.state === "assembled" ? "Assembled; no run is logged yet." : `Running, ${hours}.`,
+        say: build.state === "assembled" ? "assembled, no run logged yet." : `running, ${hours}.`,
         detail: "Run log",
         permission: "run:write",
         button: "Log a run",
@@ -67,7 +67,7 @@ function waitingFor(build: BuildInHand): Waiting {
       return build.teardownSigned
         ? {
             ...open,
-            say: `Torn down; ${build.fits - build.signedFits} of ${build.fits} fits wait for a signature.`,
+            say: `torn down; ${build.fits - build.signedFits} of ${build.fits} fits wait for a signature.`,
             detail: hours,
             permission: "proposal:sign",
             button: `Review build ${build.number}`,
@@ -75,7 +75,7 @@ function waitingFor(build: BuildInHand): Waiting {
           }
         : {
             ...open,
-            say: `Torn down; ${build.boxesDue - build.teardownDone} boxes to measure, findings to write down.`,
+            say: `torn down; ${build.boxesDue - build.teardownDone} boxes to measure, findings to write down.`,
             detail: hours,
             permission: "reading:write",
             button: "Go on with the teardown",
@@ -84,7 +84,7 @@ function waitingFor(build: BuildInHand): Waiting {
     case "reviewed":
       return {
         ...open,
-        say: "Reviewed; the next build can be started.",
+        say: "reviewed; the next build can be started.",
         detail: hours,
         permission: "build:write",
         button: "Start the next build",

@@ -127,7 +127,7 @@ export default function Build({ loaderData: build, actionData }: Route.Component
               <td>{fit.least}</td>
               <td>{fit.aim}</td>
               <td>{fit.most}</td>
-              <td>{fit.coating.replaceAll("-", " ")}</td>
+              <td className="words">{fit.coating.replaceAll("-", " ")}</td>
               <td>
                 <Link to={`${href("/builds/:buildId/sheet", { buildId: build.id })}?fit=${fit.id}`}>
                   {fit.assembly} of {fit.due}

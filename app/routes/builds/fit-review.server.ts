@@ -4,7 +4,8 @@ import { metres, picometres } from "~/engineering/quantity/length";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { wearOfClearances } from "~/engineering/wear/wear-of-clearances";
 import type { Fit } from "~/models/fit.server";
-import type { PastDecision, StoredProposal } from "~/models/proposal.server";
+import type { StoredProposal } from "~/models/proposal.server";
+import type { PastDecision } from "~/models/sign-off.server";
 import { pastDecisions } from "~/routes/engines/past-decisions";
 
 /** A proposal as the review page shows it: its headline, reasons and cautions in the page's units, drawings as numbers. */

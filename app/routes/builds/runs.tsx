@@ -121,17 +121,17 @@ export default function Runs({ loaderData, actionData }: Route.ComponentProps) {
             {runs.map((run) => (
               <tr key={run.id}>
                 <th scope="row">{run.day}</th>
-                <td>{run.kind}</td>
+                <td className="words">{run.kind}</td>
                 <td>{run.hours}</td>
                 <td>{run.laps}</td>
                 <td>{run.starts}</td>
                 <td>{run.topSpeed}</td>
-                <td>{run.oil}</td>
+                <td className="words">{run.oil}</td>
                 <td>{run.oilTemperature}</td>
                 <td>{run.idle}</td>
                 <td>{run.atSpeed}</td>
                 <td>{run.atSpeedRpm}</td>
-                <td>{[run.events, run.note].filter(Boolean).join(". ")}</td>
+                <td className="words">{[run.events, run.note].filter(Boolean).join(". ")}</td>
               </tr>
             ))}
           </tbody>

@@ -22,6 +22,8 @@ interface SheetPanelProps {
   boxes: [string, BoxState][];
   /** As-built values by box, on a teardown's sheet. */
   before?: Record<string, string>;
+  /** As-built clearances, m, on a teardown's sheet. */
+  asBuilt?: { positionId: string; clearance: number | undefined }[];
   units: PageUnits;
   gauges: GaugeChoice[];
   lastTemperature: string;
@@ -65,10 +67,14 @@ export function SheetPanel(props: SheetPanelProps) {
   );
   const onActive = useCallback((box: SheetBox) => setActive(box), []);
 
-  const clearances = sheet.positions.map((position) => ({
-    number: position.number,
-    assembled: rowClearance(judge, position.id, (key) => store.box(key).valuePm)?.vertical,
-  }));
+  const clearances = sheet.positions.map((position) => {
+    const measured = rowClearance(judge, position.id, (key) => store.box(key).valuePm)?.vertical;
+    const built = props.asBuilt?.find((one) => one.positionId === position.id)?.clearance;
+    const { number } = position;
+    return props.stage === "assembly"
+      ? { number, assembled: measured }
+      : { number, assembled: built, tornDown: measured };
+  });
   const boxes = sheet.positions.flatMap((position) => rowOf(sheet, position.id));
   const blank = boxes.filter((box) => store.box(box.key).text === "").length;
   const status = `${blank} of ${boxes.length} boxes to go. ${statusOf(store, unreachable, isScripted)}`;

@@ -15,6 +15,7 @@ import { findBuild, listTargets } from "~/models/build.server";
 import { insertFinding, listFindings } from "~/models/finding.server";
 import { listFits } from "~/models/fit.server";
 import { listGauges } from "~/models/gauge.server";
+import { measureFit } from "~/models/measured-fit";
 import { listStandingReadings } from "~/models/reading.server";
 import { listSignatures, sheetProgress, signTeardown } from "~/models/sheet.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
@@ -48,6 +49,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
   const fit = fits.find((candidate) => candidate.id === asked) ?? fits[0];
   if (!fit) throw data("This engine has no fits to measure.", { status: 404 });
   const readings = (await listStandingReadings(scope, build.id)).filter((row) => row.fitId === fit.id);
+  const gauges = await listGauges(scope);
   const after = readings.filter((row) => row.stage === "teardown");
   const signature = signatures.find((row) => row.stage === "teardown");
   const open = build.state === "torn-down" && !signature;
@@ -68,13 +70,18 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
       after,
     ),
     boxes: boxStates(after, person.units),
+    asBuilt: measureFit(
+      fit,
+      readings.filter((row) => row.stage === "assembly"),
+      gauges,
+    ).map(({ positionId, clearance }) => ({ positionId, clearance })),
     before: Object.fromEntries(
       boxStates(
         readings.filter((row) => row.stage === "assembly"),
         person.units,
       ).map(([key, box]) => [key, box.text]),
     ),
-    gauges: may(person.role, "gauge:read") ? (await listGauges(scope)).map(gaugeChoice) : [],
+    gauges: gauges.map(gaugeChoice),
     lastTemperature: after.at(-1)?.temperatureC?.toFixed(1) ?? "",
     lastGauges: {
       bore: after.findLast((row) => row.feature === "bore")?.gaugeId ?? "",
@@ -161,6 +168,7 @@ export default function Teardown({ loaderData, actionData }: Route.ComponentProp
         sheet={loaderData.sheet}
         boxes={loaderData.boxes}
         before={loaderData.before}
+        asBuilt={loaderData.asBuilt}
         units={loaderData.units}
         gauges={loaderData.gauges}
         lastTemperature={loaderData.lastTemperature}

@@ -161,7 +161,7 @@ export default function EnginePage({ loaderData: engine, actionData }: Route.Com
               <td>{fit.least}</td>
               <td>{fit.usual}</td>
               <td>{fit.most}</td>
-              <td>{fit.coating}</td>
+              <td className="words">{fit.coating}</td>
             </tr>
           ))}
         </tbody>

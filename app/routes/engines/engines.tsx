@@ -63,8 +63,8 @@ export default function Engines({ loaderData: { engines, mayAdd, next } }: Route
                 <th scope="row">
                   <Link to={href("/engines/:engineId", { engineId: engine.id })}>{engine.name}</Link>
                 </th>
-                <td>{engine.kind}</td>
-                <td>{engine.stands}</td>
+                <td className="words">{engine.kind}</td>
+                <td className="words">{engine.stands}</td>
               </tr>
             ))}
           </tbody>

@@ -19,7 +19,7 @@ import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findEngine } from "~/models/engine.server";
 import { findFit, updateFit } from "~/models/fit.server";
 import { fitHistory } from "~/models/fit-history.server";
-import { listDecisions } from "~/models/proposal.server";
+import { listDecisions } from "~/models/sign-off.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { fieldErrors, fieldsOf, optionalQuantity, quantity, text } from "~/routes/form-fields";
 import type { Route } from "./+types/fit";

@@ -54,12 +54,12 @@ export function PastDecisions({ decisions }: { decisions: ReturnType<typeof past
         {decisions.rows.map((row) => (
           <tr key={row.build}>
             <th scope="row">Build {row.build}</th>
-            <td>{row.proposed}</td>
+            <td className="words">{row.proposed}</td>
             <td>{row.to}</td>
-            <td>{row.decision}</td>
+            <td className="words">{row.decision}</td>
             <td>{row.signed}</td>
-            <td>{row.by}</td>
-            <td>{row.reason}</td>
+            <td className="words">{row.by}</td>
+            <td className="words">{row.reason}</td>
           </tr>
         ))}
       </tbody>

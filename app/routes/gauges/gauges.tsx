@@ -63,7 +63,7 @@ export default function Gauges({ loaderData: { gauges, mayAdd } }: Route.Compone
             {gauges.map((gauge) => (
               <tr key={gauge.id}>
                 <th scope="row">{gauge.name}</th>
-                <td>{gauge.kind}</td>
+                <td className="words">{gauge.kind}</td>
                 <td>{gauge.serial}</td>
                 <td>{gauge.resolution}</td>
                 <td>{gauge.calibration}</td>

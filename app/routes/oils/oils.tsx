@@ -62,12 +62,12 @@ export default function Oils({ loaderData: { oils, mayAdd } }: Route.ComponentPr
             {oils.map((oil) => (
               <tr key={oil.id}>
                 <th scope="row">{oil.name}</th>
-                <td>{oil.grade}</td>
+                <td className="words">{oil.grade}</td>
                 <td>{oil.kv40}</td>
                 <td>{oil.kv100}</td>
                 <td>{oil.density15}</td>
                 <td>{oil.hths}</td>
-                <td>{oil.note}</td>
+                <td className="words">{oil.note}</td>
               </tr>
             ))}
           </tbody>

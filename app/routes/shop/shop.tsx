@@ -81,8 +81,8 @@ export default function Shop({ loaderData: { shopName, people, rules }, actionDa
           {people.map((person) => (
             <tr key={person.id}>
               <th scope="row">{person.name}</th>
-              <td>{person.role}</td>
-              <td>{person.email}</td>
+              <td className="words">{person.role}</td>
+              <td className="words">{person.email}</td>
             </tr>
           ))}
         </tbody>

@@ -9,7 +9,7 @@ import { answerHeaders } from "./headers";
 import { type JsonAnswer, onlyOnce } from "./only-once.server";
 import { asProblem, problemDetails, problemResponse } from "./problem.server";
 import { sayIn, unitsQuery } from "./quantity-out";
-import { readJson } from "./read-json";
+import { discardBody, readJson } from "./read-json";
 
 /**
  * Answers a call of the API; whatever goes wrong in it is answered as a problem, never thrown.
@@ -41,6 +41,8 @@ export async function answerCall(
     return answered(await onlyOnce(scope, request, sent.text, () => orRefusal(work, request, reference)));
   } catch (error) {
     return problemResponse(asProblem(error, request, reference));
+  } finally {
+    discardBody(request);
   }
 }
 

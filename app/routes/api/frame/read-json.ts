@@ -34,11 +34,14 @@ async function readText(request: Request): Promise<string> {
   if (Number(request.headers.get("Content-Length")) > mostBytes) throw tooLarge();
   const chunks: Uint8Array[] = [];
   let bytes = 0;
-  // A request without a body gives no stream, and no text is not JSON either.
-  for await (const chunk of request.body ?? []) {
-    bytes += chunk.byteLength;
-    if (bytes > mostBytes) throw tooLarge();
-    chunks.push(chunk);
+  const reader = request.body?.getReader();
+  for (let part = await reader?.read(); part && !part.done; part = await reader?.read()) {
+    bytes += part.value.byteLength;
+    if (bytes > mostBytes) {
+      reader?.releaseLock();
+      throw tooLarge();
+    }
+    chunks.push(part.value);
   }
   try {
     return new TextDecoder("utf-8", { fatal: true }).decode(Buffer.concat(chunks));
@@ -49,4 +52,13 @@ async function readText(request: Request): Promise<string> {
 
 function tooLarge(): Problem {
   return new Problem(413, "too-large", `A body has at most ${mostBytes / 1_000_000} MB. Send it in parts.`);
+}
+
+/**
+ * Reads what nobody wants of a body to its end and drops it. The framework's adapter keeps all that is not read, and
+ * brings the process down where a stream is cancelled that its client still sends to.
+ */
+export function discardBody({ body }: Request): void {
+  // A client that breaks off is no matter of ours any more.
+  if (body && !body.locked) body.pipeTo(new WritableStream()).catch(() => {});
 }

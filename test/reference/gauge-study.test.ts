@@ -45,7 +45,7 @@ test("the worked study by averages and ranges", () => {
 });
 
 // The same data by analysis of variance: sums of squares, F's probability and components seen in a worked copy, to the
-// six or four figures printed there; the interaction is pooled, as its probability is over 0.25.
+// figures printed there (both together from rounded components); the interaction is pooled, as its probability is over 0.25.
 test("the worked study by analysis of variance", () => {
   const { table } = result.anova;
   expect(table.people).toEqual({ sumOfSquares: expect.closeTo(3.167262, 6), degreesOfFreedom: 2 });
@@ -57,7 +57,7 @@ test("the worked study by analysis of variance", () => {
   const found = deviations(result.anova);
   expect(found.repeatability).toBeCloseTo(0.199933, 6);
   expect(found.reproducibility).toBeCloseTo(0.226838, 6);
-  expect(found.gauge).toBeCloseTo(0.302373, 6);
+  expect(found.gauge).toBeCloseTo(0.302373, 5);
   expect(found.partToPart).toBeCloseTo(1.042327, 6);
   expect(found.total).toBeCloseTo(1.0853, 4);
   expect(result.anova.gauge.percentOfStudy).toBeCloseTo(27.86, 2);
@@ -82,12 +82,12 @@ test.each([2, 3, 4, 5, 7, 10, 15, 20])(
 );
 
 /**
- * Moments of the range from its density, n (n − 1) ∫ φ(x) φ(x + r) (Φ(x + r) − Φ(x))^(n − 2) dx, by the trapezium rule,
- * which converges faster than any power on functions that fade out at both ends.
+ * Moments of the range from its density, n (n − 1) ∫ φ(x) φ(x + r) (Φ(x + r) − Φ(x))^(n − 2) dx, by the trapezium rule;
+ * its step leaves 2e-5, at ranges near nothing.
  */
 function rangeMoments(count: number): { mean: number; meanSquare: number } {
-  const step = 0.05;
-  const half = 180;
+  const step = 0.02;
+  const half = 350;
   const at = (index: number) => (index - half) * step;
   const density = Array.from(
     { length: 2 * half + 1 },

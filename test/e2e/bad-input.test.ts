@@ -156,6 +156,12 @@ test("a build's sheet, run log and teardown name what is wrong, and keep the res
   expect(words(stale.text)).toContain("Someone else has changed this box meanwhile: it says 2.4527 now.");
   expect((await owner.open(started.location)).text).toContain('value="2.4527"');
 
+  // A position that was taken out of use meanwhile takes no reading any more.
+  const second = boxes.find((box) => !box.startsWith(boxes[0]!.split(".")[0]!))!;
+  await owner.send(`${engine}/fits/${fit}`, { intent: "retire", positionId: second.split(".")[0]! });
+  const retired = await owner.send(started.location, { ...form, [second]: "2.4527" });
+  expect(words(retired.text)).toContain("This position was taken out of use");
+
   expect((await owner.send(`${build}/runs`, { kind: "test" })).status).toBe(400);
   expect((await owner.send(started.location, { intent: "sign", version: "1" })).text).toContain(
     "boxes are blank",

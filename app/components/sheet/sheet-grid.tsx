@@ -38,9 +38,7 @@ export function SheetGrid(props: SheetGridProps) {
   const grid = useRef<HTMLTableElement>(null);
 
   const input = (key: string | undefined) =>
-    key === undefined
-      ? null
-      : grid.current?.querySelector<HTMLInputElement>(`input[name="${CSS.escape(key)}"]`);
+    key === undefined ? null : grid.current?.querySelector<HTMLInputElement>(`input[name="${key}"]`);
 
   const goTo = (box: SheetBox | undefined) => {
     const next = input(box?.key);

@@ -3,16 +3,19 @@ import { Link, type LinkProps } from "react-router";
 
 type Variant = "primary" | "plain" | "quiet" | "stop";
 
-const shape = "inline-flex min-h-11 items-center rounded px-4 text-[15px] font-semibold cursor-pointer";
+const press =
+  "inline-flex min-h-11 items-center justify-center gap-2 cursor-pointer font-medium " +
+  "disabled:cursor-not-allowed disabled:opacity-55 print:hidden";
+const box = `${press} rounded border px-4`;
 
 const looks: Record<Variant, string> = {
-  primary: `${shape} bg-layout text-on-layout border border-layout`,
-  plain: `${shape} bg-paper text-ink border border-line-strong`,
-  quiet: "inline-flex min-h-11 items-center px-2 text-layout underline underline-offset-2 cursor-pointer",
-  stop: `${shape} bg-paper text-stop border border-stop`,
+  primary: `${box} border-layout bg-layout text-on-layout enabled:hover:bg-layout-deep [a&]:hover:bg-layout-deep`,
+  plain: `${box} border-line-strong bg-paper text-ink enabled:hover:border-ink [a&]:hover:border-ink`,
+  stop: `${box} border-stop bg-paper text-stop enabled:hover:bg-stop-wash [a&]:hover:bg-stop-wash`,
+  quiet: `${press} px-2 text-layout underline underline-offset-2 hover:decoration-2`,
 };
 
-/** A button; `primary` for the one thing to do next, `quiet` where it stands in a row. */
+/** A button; `primary` for the one thing to do next, `quiet` where it stands in a row, `stop` for what cannot be undone. */
 export function Button({
   variant = "plain",
   type = "button",

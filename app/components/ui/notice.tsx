@@ -1,22 +1,35 @@
 import type { ReactNode } from "react";
+import { type Tone, ToneGlyph } from "./tone-glyph";
 
-type Tone = "ok" | "watch" | "stop";
+interface NoticeProps {
+  tone: Tone;
+  /** The whole of it in one sentence. */
+  title: string;
+  /** What to do about it. */
+  children?: ReactNode;
+}
 
-const marks: Record<Tone, { sign: string; look: string }> = {
-  ok: { sign: "✓", look: "border-ok" },
-  watch: { sign: "!", look: "border-watch bg-watch-wash" },
-  stop: { sign: "×", look: "border-stop bg-stop-wash" },
+const looks: Record<Tone, { word: string; frame: string }> = {
+  ok: { word: "Done", frame: "border-ok bg-ok-wash" },
+  watch: { word: "Watch", frame: "border-watch bg-watch-wash" },
+  stop: { word: "Stop", frame: "border-stop bg-stop-wash" },
 };
 
-/** Something the person should know, by colour, sign and words alike. */
-export function Notice({ tone, title, children }: { tone: Tone; title: string; children?: ReactNode }) {
+/** Something the person should know, said by word, glyph and colour alike, and announced when it appears. */
+export function Notice({ tone, title, children }: NoticeProps) {
+  const { word, frame } = looks[tone];
   return (
-    <div role="status" className={`mb-5 max-w-3xl border-l-4 px-4 py-3 ${marks[tone].look}`}>
-      <p className="font-semibold">
-        <span aria-hidden="true">{marks[tone].sign} </span>
-        {title}
-      </p>
-      {children}
+    <div role="status" className={`mb-5 flex max-w-3xl gap-3 border-l-4 px-4 py-3 ${frame}`}>
+      <span className="pt-0.5 text-lg leading-none">
+        <ToneGlyph tone={tone} />
+      </span>
+      <div className="grid gap-1">
+        <p className="font-semibold">
+          <span className="sr-only">{word}: </span>
+          <span>{title}</span>
+        </p>
+        {children}
+      </div>
     </div>
   );
 }

@@ -1,5 +1,5 @@
-import { type SelectHTMLAttributes, useId } from "react";
-import { describedBy, FieldError } from "./field";
+import type { SelectHTMLAttributes } from "react";
+import { FieldError, FieldHint, useFieldId } from "./field-parts";
 
 interface SelectProps extends SelectHTMLAttributes<HTMLSelectElement> {
   label: string;
@@ -9,32 +9,30 @@ interface SelectProps extends SelectHTMLAttributes<HTMLSelectElement> {
 }
 
 /** A choice of one from a list. */
-export function Select({ label, options, hint, error, ...select }: SelectProps) {
-  const id = useId();
+export function Select({ label, options, hint, error, id, ...select }: SelectProps) {
+  const { fieldId, describedBy } = useFieldId({ id, name: select.name, hint, error });
   return (
-    <div>
-      <label htmlFor={id} className="mb-1 block font-semibold">
+    <div className="flex flex-col">
+      <label htmlFor={fieldId} className="mb-1 block font-semibold">
         {label}
       </label>
-      {hint && (
-        <p id={`${id}-hint`} className="mb-1 text-[13px] text-mute">
-          {hint}
-        </p>
-      )}
-      {error && <FieldError id={`${id}-error`} message={error} />}
-      <select
-        id={id}
-        aria-invalid={error ? true : undefined}
-        aria-describedby={describedBy(id, hint, error)}
-        className="min-h-11 w-full rounded border border-line-strong bg-paper px-3 aria-[invalid=true]:border-stop"
-        {...select}
-      >
-        {options.map((option) => (
-          <option key={option.value} value={option.value}>
-            {option.label}
-          </option>
-        ))}
-      </select>
+      <FieldHint id={fieldId}>{hint}</FieldHint>
+      <FieldError id={fieldId}>{error}</FieldError>
+      <span className="mt-auto">
+        <select
+          id={fieldId}
+          aria-invalid={error ? true : undefined}
+          aria-describedby={describedBy}
+          className="entry"
+          {...select}
+        >
+          {options.map((option) => (
+            <option key={option.value} value={option.value}>
+              {option.label}
+            </option>
+          ))}
+        </select>
+      </span>
     </div>
   );
 }

@@ -7,7 +7,10 @@ interface TableProps {
   children: ReactNode;
 }
 
-/** A table of figures: units in its heads, numerals aligned, scrolling sideways by itself where it is too wide. */
+/**
+ * A dense table: units in its heads, scrolling sideways by itself where it is too wide. Cells are figures; one of
+ * words is `className="words"`, and a column of figures to be compared is `className="figure"`, head and cells.
+ */
 export function Table({ caption, hideCaption = false, children }: TableProps) {
   return (
     // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by key

@@ -1,3 +1,4 @@
+import { addDays, isAfter, isValid, parseISO } from "date-fns";
 import { z } from "zod";
 import type { PageUnits } from "~/engineering/quantity/figures";
 import { runEvents, runKinds } from "~/engineering/trade/condition";
@@ -8,10 +9,10 @@ const day = z
   .trim()
   .regex(/^\d{4}-\d{2}-\d{2}(T\d{2}:\d{2})?$/, "Type the day as year-month-day: 2026-05-30.")
   .transform((typed, context): Date => {
-    const date = new Date(typed);
-    if (Number.isNaN(date.getTime())) context.addIssue({ code: "custom", message: "There is no such day." });
+    const date = parseISO(typed);
+    if (!isValid(date)) context.addIssue({ code: "custom", message: "There is no such day." });
     // A day's grace: the shop's clock and the server's may stand in different time zones.
-    else if (date.getTime() > Date.now() + 24 * 60 * 60 * 1000) {
+    else if (isAfter(date, addDays(new Date(), 1))) {
       context.addIssue({
         code: "custom",
         message: "This day is in the future; a run is logged when it has been run.",

@@ -17,7 +17,7 @@ import {
 import { materials } from "~/engineering/temperature/materials";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findEngine } from "~/models/engine.server";
-import { findFit, updateFit } from "~/models/fit.server";
+import { findFit, retirePosition, updateFit } from "~/models/fit.server";
 import { fitHistory } from "~/models/fit-history.server";
 import { listDecisions } from "~/models/sign-off.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
@@ -40,7 +40,10 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     engineName: engine.name,
     title: `${engine.name}: ${fitKind(fit.kind).name.toLowerCase()}`,
     units: person.units,
-    positions: fit.positions.length,
+    positions: fit.positions.map(({ id, number }) => ({
+      value: id,
+      label: `${fitKind(fit.kind).position} ${number}`,
+    })),
     mayWrite: may(person.role, "engine:write"),
     version: fit.version,
     fields: {
@@ -98,6 +101,12 @@ export async function action({ request, context, params }: Route.ActionArgs) {
   const { person, scope } = requirePerson({ request, context }, "engine:write");
   const fit = await orPage(findFit(scope, params.engineId, params.fitId));
   const form = await request.formData();
+  if (form.get("intent") === "retire") {
+    return orFormErrors(form, async () => {
+      await retirePosition(scope, fit, String(form.get("positionId")));
+      return null;
+    });
+  }
   const typed = fitForm(person.units).safeParse(fieldsOf(form));
   if (!typed.success) return refuseForm(fieldErrors(typed.error), form);
   const { version, ...change } = typed.data;
@@ -112,7 +121,7 @@ export default function FitPage({ loaderData: fit, actionData }: Route.Component
   return (
     <Page
       title={fit.title}
-      subtitle={`${fit.positions} positions · clearances diametral at 20 °C, ${clearanceUnit(fit.units)}`}
+      subtitle={`${fit.positions.length} positions · clearances diametral at 20 °C, ${clearanceUnit(fit.units)}`}
       breadcrumbs={[
         { to: href("/engines"), label: "Engines" },
         { to: href("/engines/:engineId", { engineId: fit.engineId }), label: fit.engineName },
@@ -127,7 +136,19 @@ export default function FitPage({ loaderData: fit, actionData }: Route.Component
       )}
       <PastDecisions decisions={fit.decisions} />
       {fit.mayWrite ? (
-        <FitSettings fit={fit} refused={refused} />
+        <>
+          <FitSettings fit={fit} refused={refused} />
+          <Form method="post" className="mt-9 flex max-w-xl flex-wrap items-end gap-4">
+            <input type="hidden" name="intent" value="retire" />
+            <Select
+              label="Position that is no longer there"
+              hint="What was measured at it stays in the record"
+              name="positionId"
+              options={fit.positions}
+            />
+            <Button type="submit">Take it out of use</Button>
+          </Form>
+        </>
       ) : (
         <p className="mt-6 text-mute">
           Limits {fit.fields.least} to {fit.fields.most}, usual {fit.fields.usual}. {fit.fields.limitsSource}.

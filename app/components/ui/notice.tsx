@@ -23,7 +23,7 @@ export function Notice({ tone, title, children }: NoticeProps) {
       <span className="pt-0.5 text-lg leading-none">
         <ToneGlyph tone={tone} />
       </span>
-      <div className="grid gap-1">
+      <div className="grid justify-items-start gap-1">
         <p className="font-semibold">
           <span className="sr-only">{word}: </span>
           <span>{title}</span>

@@ -12,7 +12,7 @@ const colours: Record<Tone, string> = { ok: "text-ok", watch: "text-watch", stop
 /** A state in a line or a cell: glyph, word and colour say the same. */
 export function StateWord({ tone, children }: StateWordProps) {
   return (
-    <span className={`inline-flex items-center gap-1.5 whitespace-nowrap ${colours[tone]}`}>
+    <span className={`inline-flex items-center align-bottom gap-1.5 whitespace-nowrap ${colours[tone]}`}>
       <ToneGlyph tone={tone} />
       {children}
     </span>

@@ -16,7 +16,7 @@ export function CallSection({ call, origin }: { call: CallDescription; origin: s
       {call.query.length > 0 && <Fields caption="Query" fields={call.query} />}
       {call.body.length > 0 && <Fields caption="Body" fields={call.body} />}
       {call.example && (
-        {/* biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by key */}
+        // biome-ignore lint/a11y/noNoninteractiveTabindex: what scrolls must be reachable by key
         <pre tabIndex={0} className="my-3 overflow-x-auto bg-plate-deep p-3 font-mono text-[13px]">
           {`curl ${origin}/api/v1${call.path} -H "Authorization: Bearer $TOKEN" -H "Content-Type: application/json" -d '${call.example}'`}
         </pre>

@@ -25,7 +25,10 @@ export default function Api({ loaderData: { origin, groups, problems, limits } }
               <ul>
                 {calls.map(({ id, method, path }) => (
                   <li key={id}>
-                    <a href={`#${id}`} className="inline-flex min-h-6 items-center font-mono text-[13px] text-layout">
+                    <a
+                      href={`#${id}`}
+                      className="inline-flex min-h-6 items-center font-mono text-[13px] text-layout"
+                    >
                       {method} {path}
                     </a>
                   </li>

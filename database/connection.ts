@@ -1,7 +1,7 @@
 import { mkdirSync } from "node:fs";
 import { join } from "node:path";
 import SqliteDatabase from "better-sqlite3";
-import { Kysely, SqliteDialect, type Transaction } from "kysely";
+import { type Driver, Kysely, SqliteDialect, type Transaction } from "kysely";
 import { configuration } from "./configuration";
 import type { Schema } from "./schema";
 
@@ -19,7 +19,26 @@ export function openDatabase(file: string): Database {
   sqlite.pragma("foreign_keys = ON");
   sqlite.pragma("busy_timeout = 5000");
   sqlite.pragma("trusted_schema = OFF");
-  return new Kysely<Schema>({ dialect: new SqliteDialect({ database: sqlite }) });
+  return new Kysely<Schema>({ dialect: new RollingBackDialect(sqlite) });
+}
+
+/**
+ * SQLite rolls a transaction back by itself when the disk is full or fails. A second ROLLBACK is then an error that would
+ * hide the first one, and the person would not learn what happened.
+ */
+class RollingBackDialect extends SqliteDialect {
+  constructor(private readonly sqlite: SqliteDatabase.Database) {
+    super({ database: sqlite });
+  }
+
+  override createDriver(): Driver {
+    const driver = super.createDriver();
+    const rollback = driver.rollbackTransaction.bind(driver);
+    driver.rollbackTransaction = async (connection) => {
+      if (this.sqlite.inTransaction) await rollback(connection);
+    };
+    return driver;
+  }
 }
 
 // One connection for the process; on globalThis so that the development server's reloads keep it.

@@ -104,7 +104,11 @@ async function writeReading(
   await refuseForeignPosition(transaction, build, reading.box);
   const standing = await findStanding(transaction, build.id, reading.box);
   const supersedes = reading.supersedes === undefined ? (standing?.id ?? null) : reading.supersedes;
-  if (supersedes !== (standing?.id ?? null)) throw filledMeanwhile(standing?.typed);
+  if (supersedes !== (standing?.id ?? null)) {
+    // The answer to a first try may have been lost on its way: the same value sent again is there already.
+    if (standing && isSameEntry(standing, scope, reading)) return standing.id;
+    throw filledMeanwhile(standing?.typed);
+  }
   const id = newId();
   try {
     await transaction
@@ -170,7 +174,7 @@ async function refuseForeignPosition(
 async function findStanding(transaction: DatabaseTransaction, buildId: string, box: Box) {
   const rows = await transaction
     .selectFrom("reading")
-    .select(["id", "typed"])
+    .select(["id", "typed", "unit", "state", "person_id", "supersedes_id"])
     .where("build_id", "=", buildId)
     .where("stage", "=", box.stage)
     .where("position_id", "=", box.positionId)
@@ -190,6 +194,20 @@ async function findStanding(transaction: DatabaseTransaction, buildId: string, b
     )
     .execute();
   return rows[0];
+}
+
+function isSameEntry(
+  standing: NonNullable<Awaited<ReturnType<typeof findStanding>>>,
+  scope: Scope,
+  reading: NewReading,
+): boolean {
+  return (
+    standing.person_id === scope.personId &&
+    standing.supersedes_id === reading.supersedes &&
+    standing.state === reading.state &&
+    standing.typed === (reading.value?.typed ?? "") &&
+    standing.unit === (reading.value?.unit ?? null)
+  );
 }
 
 function filledMeanwhile(typed: string | undefined) {

@@ -19,7 +19,7 @@ interface BoreViewProps {
   /** One plane's readings, one an axis. */
   bore: readonly AxisReading[];
   journal: readonly AxisReading[];
-  /** Nominal diameter, m: it stands in for a part that is not measured. */
+  /** Nominal diameter, m: it stands in for a journal that is not measured. */
   nominal: number;
   /** The same bore as it was built, at teardown: what lies between is shaded as wear. */
   boreAsBuilt?: readonly AxisReading[] | undefined;
@@ -41,7 +41,9 @@ const centreY = 172;
 const journalRadius = 88;
 /** The widest gap as it is drawn, px. */
 const gap = 28;
-const shell = 16;
+const outerRadius = journalRadius + gap + 16;
+/** Less than this, m, is not blown up further: the error of a gauge would look like a shape. */
+const leastGap = 10e-6;
 
 /** Bore and journal in section, centred, the clearance many times larger than it is, each measured axis by name. */
 export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [] }: BoreViewProps) {
@@ -49,17 +51,18 @@ export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [
   const base = journal.length > 0 ? mean(journal) : nominal;
   const widest = Math.max(
     ...[...bore, ...journal, ...boreAsBuilt].map(({ value }) => Math.abs(value - base)),
-    1e-6,
+    leastGap,
   );
-  const radius = (readings: readonly AxisReading[]) => {
-    const diameter = around(readings, nominal);
+  const radius = (readings: readonly AxisReading[], unmeasured: number) => {
+    if (readings.length === 0) return () => unmeasured;
+    const diameter = diameterAround(new Map(readings.map(({ axis, value }) => [axisAngles[axis], value])));
     return (degrees: number) => journalRadius + ((diameter(degrees) - base) / widest) * gap;
   };
-  const boreRadius = radius(bore);
+  const boreRadius = radius(bore, journalRadius + gap);
   const larger = ((gap / widest) * base) / journalRadius;
   const figure = (value: number) => diameterText(picometres(value), units);
   const hatch = `${title.replaceAll(/[^a-z0-9]+/gi, "-")}-shell`;
-  const outer = `M${centreX - journalRadius - gap - shell} ${centreY}a${journalRadius + gap + shell} ${journalRadius + gap + shell} 0 1 0 ${2 * (journalRadius + gap + shell)} 0a${journalRadius + gap + shell} ${journalRadius + gap + shell} 0 1 0 ${-2 * (journalRadius + gap + shell)} 0Z`;
+  const outer = outline(centreX, centreY, () => outerRadius);
   const boreOutline = outline(centreX, centreY, boreRadius);
 
   return (
@@ -83,10 +86,11 @@ export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [
       <path d={outer + boreOutline} fillRule="evenodd" fill={`url(#${hatch})`} />
       {bore.length > 0 && boreAsBuilt.length > 0 && (
         <path
-          d={boreOutline + outline(centreX, centreY, radius(boreAsBuilt))}
+          d={boreOutline + outline(centreX, centreY, radius(boreAsBuilt, journalRadius))}
           fillRule="evenodd"
           fill="var(--watch)"
           fillOpacity=".45"
+          data-wear=""
         />
       )}
       <path
@@ -97,7 +101,7 @@ export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [
         strokeDasharray={bore.length === 0 ? "4 4" : undefined}
       />
       <path
-        d={outline(centreX, centreY, radius(journal))}
+        d={outline(centreX, centreY, radius(journal, journalRadius))}
         fill="var(--plate-deep)"
         stroke="var(--ink)"
         strokeWidth="1.5"
@@ -133,10 +137,10 @@ function BoreAxis({ reading, radius, text }: BoreAxisProps) {
   const distance = radius(angle);
   const tick = (degrees: number) => {
     const [fromAcross, fromUp] = at(degrees, distance - 5);
-    const [toAcross, toUp] = at(degrees, journalRadius + gap + shell + 5);
+    const [toAcross, toUp] = at(degrees, outerRadius + 5);
     return `M${place(centreX + fromAcross)} ${place(centreY - fromUp)}L${place(centreX + toAcross)} ${place(centreY - toUp)}`;
   };
-  const [across, up] = at(angle, journalRadius + gap + shell + 9);
+  const [across, up] = at(angle, outerRadius + 9);
   const anchor = angle === 90 ? "middle" : angle > 90 ? "end" : "start";
   const x = place(centreX + across);
   const y = place(centreY - up) - (angle === 90 ? 14 : 6);
@@ -184,11 +188,6 @@ function JournalAxis({ axis, text }: { axis: Axis; text: string }) {
 
 function mean(readings: readonly AxisReading[]): number {
   return readings.reduce((sum, { value }) => sum + value, 0) / readings.length;
-}
-
-function around(readings: readonly AxisReading[], nominal: number): (degrees: number) => number {
-  if (readings.length === 0) return () => nominal;
-  return diameterAround(new Map(readings.map(({ axis, value }) => [axisAngles[axis], value])));
 }
 
 function summaryOf(bore: readonly AxisReading[], journal: readonly AxisReading[], units: PageUnits): string {

@@ -38,7 +38,7 @@ export interface Iteration {
   starts?: number;
   oil: OilOfRun | null;
   events: readonly (RunEvent | (string & {}))[];
-  /** The coating that this build ran on, where it is not the fit's present one. */
+  /** The kind of coating that this build ran on, null for none; not given, the fit's present one. */
   coating?: string | null;
   positions: PositionOfBuild[];
 }

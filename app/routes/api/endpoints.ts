@@ -1,6 +1,17 @@
 import { z } from "zod";
+import { postClearance } from "./calculators/clearance";
+import { postConvert } from "./calculators/convert";
+import { postCycle } from "./calculators/cycle";
+import { postFilm } from "./calculators/film";
+import { postFitLine } from "./calculators/fit-line";
+import { postGaugeStudy } from "./calculators/gauge-study";
+import { postMap } from "./calculators/map";
+import { postOilCalculation } from "./calculators/oil";
+import { postWear } from "./calculators/wear";
 import { type Endpoint, endpoint } from "./frame/endpoint";
 import { openApi } from "./frame/openapi";
+import { postNextStep } from "./next-step/calculator";
+import { getHistory, getNextStep, postNextStepOfFit, postSignature } from "./next-step/of-fit";
 import { getBuild, postBuild, postState } from "./shop/builds";
 import { getEngine, getEngines, postEngine } from "./shop/engines";
 import { postFinding } from "./shop/findings";
@@ -9,6 +20,19 @@ import { getHealth } from "./shop/health";
 import { getOil, getOils, postOil } from "./shop/oils";
 import { getReadings, postReadings } from "./shop/readings";
 import { postRun } from "./shop/runs";
+
+const calculators = [
+  postConvert,
+  postClearance,
+  postOilCalculation,
+  postFilm,
+  postCycle,
+  postWear,
+  postFitLine,
+  postNextStep,
+  postGaugeStudy,
+  postMap,
+];
 
 const shop = [
   getHealth,
@@ -22,6 +46,10 @@ const shop = [
   postState,
   postRun,
   postFinding,
+  getHistory,
+  getNextStep,
+  postNextStepOfFit,
+  postSignature,
   getOils,
   postOil,
   getOil,
@@ -40,4 +68,4 @@ const getOpenApi = endpoint({
 });
 
 /** Every call of the API, in the order that the page `/api` shows them. */
-export const endpoints: readonly Endpoint[] = [...shop, getOpenApi];
+export const endpoints: readonly Endpoint[] = [...calculators, ...shop, getOpenApi];

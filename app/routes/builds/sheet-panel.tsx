@@ -212,7 +212,8 @@ function withRefused(
 
 function statusOf(store: SheetStore, unreachable: boolean, isScripted: boolean): string {
   if (!isScripted) return "Saved when you press the button";
-  if (unreachable) return `The server does not answer: ${store.waiting} waiting, kept here and sent again`;
+  if (unreachable)
+    return `The server cannot save just now: ${store.waiting} waiting, kept here and sent again`;
   return store.waiting > 0 ? `Saving ${store.waiting}` : "All saved";
 }
 

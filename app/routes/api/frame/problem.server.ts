@@ -90,6 +90,7 @@ export function notValid(errors: FieldError[]): Problem {
 }
 
 /** What the engineering core refuses, as an error of the field it names. */
-export function fieldError(error: EngineeringError, path = error.field): FieldError {
-  return { path, code: error.code, message: error.message };
+export function fieldError({ code, field, message }: EngineeringError): FieldError {
+  // The core names a temperature with its unit, as `supplyTemperatureC`; the API takes it with any unit.
+  return { path: field.replace(/([tT]emperature)C\b/g, "$1"), code, message };
 }

@@ -1,5 +1,6 @@
 import { z } from "zod";
 import { EngineeringError } from "~/engineering/engineering-error";
+import { parseAnyQuantity } from "~/engineering/quantity/convert";
 import { formatWithUnit } from "~/engineering/quantity/format";
 import { parseQuantity, type Quantity } from "~/engineering/quantity/parse";
 import { type QuantityKind, toCore, type UnitName, unitsOf } from "~/engineering/quantity/units";
@@ -37,6 +38,33 @@ export const amount = (kind: QuantityKind, limits: Limits = {}) =>
       });
     })
     .meta({ type: ["string", "object"], ...described(kind, limits) });
+
+/** A quantity of whatever kind its unit says. */
+export const anyQuantity = z
+  .unknown()
+  .transform((given, context): Quantity => {
+    if (typeof given !== "string") return refuse(context, notText(given, "length"));
+    return orRefuse(context, () => parseAnyQuantity(given));
+  })
+  .meta({ type: "string", description: "With any unit.", examples: ["2.1000 in"] });
+
+/**
+ * A figure of a study that is about no unit in particular: a length with its unit, or a plain number.
+ * Gives the number, and whether it is a length in m.
+ */
+export const figure = z
+  .unknown()
+  .transform((given, context): { value: number; isLength: boolean } => {
+    if (typeof given === "number" && Number.isFinite(given)) return { value: given, isLength: false };
+    const length = amount("small-length").safeParse(given);
+    if (length.success) return { value: length.data, isLength: true };
+    return refuse(context, { code: "wrong-type", message: length.error.issues[0]!.message });
+  })
+  .meta({
+    type: ["string", "object", "number"],
+    description: "A length with its unit, or in all places a plain number.",
+    examples: ["2.10012 in", 0.29],
+  });
 
 const answeredQuantity = z.strictObject({ si: z.number(), text: z.string() });
 

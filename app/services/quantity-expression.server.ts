@@ -2,7 +2,7 @@ import type { Fraction, MathJsInstance, MathNode, OperatorNode, Unit } from "mat
 import { EngineeringError } from "~/engineering/engineering-error";
 import { formatLength } from "~/engineering/quantity/format";
 import { metres } from "~/engineering/quantity/length";
-import { type ParseOptions, parseQuantity, type Quantity } from "~/engineering/quantity/parse";
+import { largest, type ParseOptions, parseQuantity, type Quantity } from "~/engineering/quantity/parse";
 import {
   isUnitOf,
   picometresIn,
@@ -54,7 +54,7 @@ async function sum(typed: string, kind: QuantityKind, defaultUnit: UnitName | un
   const result = reckon(math, terms);
   const total = first ? ofBaseUnit(math, result) : ofNumbers(math, result, unit);
   const decimals = Math.max(...terms.map(decimalsOf));
-  if (!isUnitOf(unit, "length")) return { kind, si: total.valueOf(), typed, unit, decimals };
+  if (!isUnitOf(unit, "length")) return { kind, si: notTooLarge(total.valueOf()), typed, unit, decimals };
   const picometres = nearestWhole(total);
   return {
     kind,
@@ -115,8 +115,12 @@ function ofNumbers(math: MathJsInstance, result: unknown, unit: UnitName): Fract
 
 function nearestWhole(total: Fraction): number {
   const whole = Number(total.round().valueOf());
-  if (Number.isSafeInteger(whole)) return whole;
-  throw new EngineeringError("too-large", "value", "This length is larger than anything in an engine.");
+  return Number.isSafeInteger(whole) ? whole : notTooLarge(Number.POSITIVE_INFINITY);
+}
+
+function notTooLarge(value: number): number {
+  if (Math.abs(value) <= largest) return value;
+  throw new EngineeringError("too-large", "value", "This is larger than anything in an engine.");
 }
 
 /** As many decimals as were typed, and up to four more where the result needs them. */

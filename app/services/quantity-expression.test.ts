@@ -1,5 +1,7 @@
 import { execFileSync } from "node:child_process";
+import fc from "fast-check";
 import { expect, test } from "vitest";
+import { EngineeringError } from "~/engineering/engineering-error";
 import { evaluateQuantity } from "./quantity-expression.server";
 
 const pm = async (text: string, options = {}) => (await evaluateQuantity(text, "length", options)).picometres;
@@ -58,6 +60,9 @@ test("other kinds add up too", async () => {
   expect((await evaluateQuantity("60 psi - 0.5 bar", "pressure")).si).toBeCloseTo(363_685.4375901, 6);
   expect((await evaluateQuantity("10 mm2/s + 6.2 cSt", "kinematic-viscosity")).si).toBeCloseTo(16.2, 12);
   expect((await evaluateQuantity("3000 rpm + 2 * 1500 rpm", "speed")).si).toBeCloseTo(200 * Math.PI, 9);
+  await expect(evaluateQuantity("999999999 MPa * 99999", "pressure")).rejects.toMatchObject({
+    code: "too-large",
+  });
   expect((await evaluateQuantity("40 lbf ft / 2", "torque")).si).toBeCloseTo(27.116358966628, 9);
 });
 
@@ -102,6 +107,32 @@ test("temperatures do not add up", async () => {
   await expect(evaluateQuantity("95 degC - 20 degC", "temperature")).rejects.toMatchObject({
     code: "not-a-sum",
   });
+});
+
+test("whatever is typed gives a finite length or a sentence, and nothing else", async () => {
+  const piece = fc.constantFrom(
+    ..."0123456789.,+-*/()^=;[]v_ ",
+    " mm",
+    " in",
+    "µm",
+    '"',
+    "sqrt",
+    "import",
+    " + ",
+    " - ",
+  );
+  const scribble = fc.array(piece, { maxLength: 14 }).map((pieces) => pieces.join(""));
+  await fc.assert(
+    fc.asyncProperty(scribble, async (text) => {
+      try {
+        const { picometres } = await evaluateQuantity(text, "length", { defaultUnit: "in" });
+        expect(Number.isSafeInteger(picometres)).toBe(true);
+      } catch (error) {
+        expect(error).toBeInstanceOf(EngineeringError);
+      }
+    }),
+    { numRuns: 1000 },
+  );
 });
 
 test("mathjs is loaded by the first sum, and not by the server's start or a single quantity", () => {

@@ -1,4 +1,6 @@
+import fc from "fast-check";
 import { expect, test } from "vitest";
+import { EngineeringError } from "../engineering-error";
 import { parseQuantity } from "./parse";
 import type { QuantityKind, UnitName } from "./units";
 
@@ -156,4 +158,39 @@ test.each<[QuantityKind, UnitName[]]>([
   ["temperature", ["degC", "degF", "K"]],
 ])("every unit of a %s is read by its name in the API", (kind, names) => {
   for (const name of names) expect(parseQuantity(`300 ${name}`, kind).unit).toBe(name);
+});
+
+test("whatever is typed gives a finite quantity or a sentence, and nothing else", () => {
+  const piece = fc.constantFrom(
+    ..."0123456789.,+-−/ '\"eE",
+    "in",
+    "mm",
+    "µm",
+    "tenths",
+    "psi",
+    "\u00a0",
+    "\u202e",
+    "1 7/8",
+  );
+  const scribble = fc.oneof(
+    fc.array(piece, { maxLength: 12 }).map((pieces) => pieces.join("")),
+    fc.string({ unit: "grapheme" }),
+  );
+  fc.assert(
+    fc.property(
+      scribble,
+      fc.constantFrom<QuantityKind>("length", "pressure", "temperature"),
+      (text, kind) => {
+        try {
+          const quantity = parseQuantity(text, kind, { nominal: 53_340_000_000 });
+          expect(Number.isFinite(quantity.si)).toBe(true);
+          if (kind === "length") expect(Number.isSafeInteger(quantity.picometres)).toBe(true);
+        } catch (error) {
+          expect(error).toBeInstanceOf(EngineeringError);
+          expect((error as EngineeringError).message).toMatch(/\.$/);
+        }
+      },
+    ),
+    { numRuns: 3000 },
+  );
 });

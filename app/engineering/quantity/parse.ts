@@ -37,7 +37,10 @@ export interface ParseOptions {
 const longest = 60;
 // Twelve figures come back unchanged through any of the units' factors in double precision; no instrument shows more.
 const mostFigures = 10n ** 12n;
-const largest = 1e15;
+
+/** No quantity of an engine is larger than this in the core's units, lengths apart. */
+export const largest = 1e15;
+
 const absoluteZeroC = -273.15;
 
 /**

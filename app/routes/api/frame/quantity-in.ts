@@ -4,6 +4,7 @@ import { parseAnyQuantity } from "~/engineering/quantity/convert";
 import { formatWithUnit } from "~/engineering/quantity/format";
 import { parseQuantity, type Quantity } from "~/engineering/quantity/parse";
 import { type QuantityKind, toCore, type UnitName, unitsOf } from "~/engineering/quantity/units";
+import { readProgramNumber } from "./program-number";
 
 /** Where a quantity may lie, in the core's units (SI; °C; mm²/s). */
 interface Limits {
@@ -19,7 +20,7 @@ export const quantity = (kind: QuantityKind, limits: Limits = {}) =>
     .unknown()
     .transform((given, context): Quantity => {
       if (typeof given !== "string") return refuse(context, notText(given, kind));
-      return orRefuse(context, () => within(parseQuantity(given, kind), limits));
+      return orRefuse(context, () => within(read(given, kind), limits));
     })
     .meta({ type: "string", ...described(kind, limits) });
 
@@ -31,9 +32,7 @@ export const amount = (kind: QuantityKind, limits: Limits = {}) =>
       const answered = answeredQuantity.safeParse(given);
       if (typeof given !== "string" && !answered.success) return refuse(context, notText(given, kind));
       return orRefuse(context, () => {
-        const si = answered.success
-          ? coreOf(answered.data.si, kind)
-          : parseQuantity(given as string, kind).si;
+        const si = answered.success ? coreOf(answered.data.si, kind) : read(given as string, kind).si;
         return within({ kind, si }, limits).si;
       });
     })
@@ -44,7 +43,7 @@ export const anyQuantity = z
   .unknown()
   .transform((given, context): Quantity => {
     if (typeof given !== "string") return refuse(context, notText(given, "length"));
-    return orRefuse(context, () => parseAnyQuantity(given));
+    return orRefuse(context, () => readProgramNumber(given, parseAnyQuantity));
   })
   .meta({ type: "string", description: "With any unit.", examples: ["2.1000 in"] });
 
@@ -69,6 +68,9 @@ export const figure = z
 const answeredQuantity = z.strictObject({ si: z.number(), text: z.string() });
 
 const coreOf = (si: number, kind: QuantityKind) => (kind === "kinematic-viscosity" ? toCore(si, "m2/s") : si);
+
+const read = (text: string, kind: QuantityKind) =>
+  readProgramNumber(text, (written) => parseQuantity(written, kind));
 
 interface Fault {
   code: string;

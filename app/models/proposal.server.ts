@@ -38,6 +38,19 @@ export async function proposalFor(scope: Scope, fit: Fit, build: BuildOfProposal
   return (await findStored(scope, fit, build)) ?? workOut(scope, fit, build);
 }
 
+/** The latest proposal of a fit that was ever worked out, whichever build it was for. */
+export async function findLatestProposal(scope: Scope, fit: Fit): Promise<StoredProposal | undefined> {
+  const build = await database()
+    .selectFrom("proposal")
+    .innerJoin("build", "build.id", "proposal.build_id")
+    .select(["build.id", "build.number"])
+    .where("proposal.fit_id", "=", fit.id)
+    .where("proposal.shop_id", "=", scope.shopId)
+    .orderBy("build.number", "desc")
+    .executeTakeFirst();
+  return build && findStored(scope, fit, build);
+}
+
 /** Works the proposal out again from the evidence as it stands. @throws Refusal `conflict` where it is signed */
 export async function recomputeProposal(
   scope: Scope,

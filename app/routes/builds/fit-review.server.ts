@@ -1,3 +1,4 @@
+import { likelyLimit } from "~/engineering/next-step/likely-band";
 import type { Iteration, NextStep } from "~/engineering/next-step/types";
 import { clearanceText, dayText, type PageUnits } from "~/engineering/quantity/figures";
 import { metres, picometres } from "~/engineering/quantity/length";
@@ -49,7 +50,11 @@ export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDec
       step: answer.step === 0 ? undefined : { from: answer.target - answer.step, to: answer.target },
     },
     wear: build ? wearOfClearances(beforeAfter(build), build.hours) : [],
-    decisions: pastDecisions(decisions, units),
+    decisions: pastDecisions(
+      decisions.filter((decision) => decision.number < proposal.buildNumber),
+      history.iterations,
+      units,
+    ),
   };
 }
 
@@ -66,12 +71,6 @@ function beforeAfter(build: Iteration) {
       ? [{ position, assembled: assembled.clearance, tornDown: tornDown.clearance, uncertainty }]
       : [],
   );
-}
-
-/** The narrowest band of the belief that is worth drawing: "7 in 10 that the limit lies here". */
-function likelyLimit(answer: NextStep) {
-  const bands = answer.evidence.posterior?.bands ?? [];
-  return bands.find((band) => band.share >= 0.65 && band.share <= 0.75) ?? bands[0];
 }
 
 const verbs: Record<NextStep["action"], string> = {

@@ -7,6 +7,7 @@ import { Field } from "~/components/ui/field";
 import { Notice } from "~/components/ui/notice";
 import { clearanceUnit } from "~/engineering/quantity/figures";
 import type { FormRefusal } from "~/routes/answer.server";
+import { PastDecisions } from "~/routes/engines/past-decisions";
 import type { FitReviewData } from "./fit-review.server";
 
 interface FitReviewProps {
@@ -92,13 +93,14 @@ export function FitReview({ fit, engineId, maySign, mayAsk, refused }: FitReview
       </p>
       <details className="mt-2">
         <summary className="flex min-h-11 cursor-pointer items-center">
-          What would change it, and the wear
+          What would change it, the wear, and the steps before
         </summary>
         <ul className="mb-4 list-disc pl-5">
           {fit.wouldChange.map((sentence) => (
             <li key={sentence}>{sentence}</li>
           ))}
         </ul>
+        <PastDecisions decisions={fit.decisions} />
         {fit.wear.length > 0 && (
           <WearBars title={`${fit.name}, wear per hour`} units={fit.units} bars={fit.wear} />
         )}

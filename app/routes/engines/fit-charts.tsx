@@ -1,37 +1,56 @@
 import { ClearanceByBuild } from "~/components/drawings/clearance-by-build";
-import type { Iteration } from "~/engineering/next-step/types";
+import { WearAgainstClearance } from "~/components/drawings/wear-against-clearance";
+import type { BuildEvidence, Iteration } from "~/engineering/next-step/types";
+import { worstGrade } from "~/engineering/next-step/worst-grade";
 import type { PageUnits } from "~/engineering/quantity/figures";
 
 interface FitChartsProps {
   title: string;
   units: PageUnits;
   builds: Iteration[];
+  /** What the latest proposal made of each build, and where it thinks the limit lies. */
+  evidence: BuildEvidence[];
+  likelyLimit: { from: number; to: number; share: number } | undefined;
 }
 
 /** A fit's history as drawings. */
-export function FitCharts({ title, units, builds }: FitChartsProps) {
+export function FitCharts({ title, units, builds, evidence, likelyLimit }: FitChartsProps) {
   return (
-    <ClearanceByBuild
-      title={`${title}, clearance by build`}
-      units={units}
-      builds={builds.map((build) => ({
-        build: build.build,
-        target: build.target,
-        hours: build.hours ?? undefined,
-        oil: build.oil?.name,
-        grade: worstGrade(build),
-        positions: build.positions.map((position) => ({
-          number: position.position,
-          assembled: position.assembled?.clearance,
-          tornDown: position.tornDown?.clearance,
-        })),
-      }))}
-    />
+    <div className="mb-6 grid gap-6">
+      <ClearanceByBuild
+        title={`${title}, clearance by build`}
+        units={units}
+        builds={builds.map((build) => ({
+          build: build.build,
+          target: build.target,
+          hours: build.hours ?? undefined,
+          oil: build.oil?.name,
+          grade: worstGrade(build),
+          positions: build.positions.map((position) => ({
+            number: position.position,
+            assembled: position.assembled?.clearance,
+            tornDown: position.tornDown?.clearance,
+          })),
+        }))}
+      />
+      <WearAgainstClearance
+        title={`${title}, wear against clearance`}
+        units={units}
+        likelyLimit={likelyLimit}
+        points={evidence.flatMap(({ build, clearance, wearRate, wearRateUncertainty, worstGrade }) =>
+          clearance === null || wearRate === null || wearRateUncertainty === null
+            ? []
+            : [
+                {
+                  build,
+                  clearance,
+                  rate: wearRate,
+                  uncertainty: 2 * wearRateUncertainty,
+                  grade: worstGrade ?? undefined,
+                },
+              ],
+        )}
+      />
+    </div>
   );
-}
-
-/** The worst grade of a build's positions; `undefined` where none is graded. */
-export function worstGrade(build: Iteration): number | undefined {
-  const grades = build.positions.flatMap((position) => position.grade ?? []);
-  return grades.length > 0 ? Math.max(...grades) : undefined;
 }

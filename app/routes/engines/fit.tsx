@@ -8,6 +8,7 @@ import { ErrorSummary } from "~/components/ui/error-summary";
 import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { Select } from "~/components/ui/select";
+import { likelyLimit } from "~/engineering/next-step/likely-band";
 import {
   clearanceUnit,
   clearanceUnitName,
@@ -19,6 +20,7 @@ import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findEngine } from "~/models/engine.server";
 import { findFit, retirePosition, updateFit } from "~/models/fit.server";
 import { fitHistory } from "~/models/fit-history.server";
+import { findLatestProposal } from "~/models/proposal.server";
 import { listDecisions } from "~/models/sign-off.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { fieldErrors, fieldsOf, optionalQuantity, quantity, text } from "~/routes/form-fields";
@@ -34,7 +36,11 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
   const { person, scope } = requirePerson({ request, context }, "engine:read");
   const engine = await orPage(findEngine(scope, params.engineId));
   const fit = await orPage(findFit(scope, params.engineId, params.fitId));
-  const [history, decisions] = await Promise.all([fitHistory(scope, fit), listDecisions(scope, fit.id)]);
+  const [history, decisions, latest] = await Promise.all([
+    fitHistory(scope, fit),
+    listDecisions(scope, fit.id),
+    findLatestProposal(scope, fit),
+  ]);
   return {
     engineId: engine.id,
     engineName: engine.name,
@@ -64,7 +70,9 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     materials: materials.map(({ key, name }) => ({ value: key, label: name })),
     limits: history.fit.hardLimits,
     builds: history.iterations,
-    decisions: pastDecisions(decisions, person.units),
+    evidence: latest?.answer.evidence.builds ?? [],
+    likelyLimit: latest && likelyLimit(latest.answer),
+    decisions: pastDecisions(decisions, history.iterations, person.units),
   };
 }
 
@@ -132,7 +140,13 @@ export default function FitPage({ loaderData: fit, actionData }: Route.Component
           No build of this engine is torn down yet; the first one starts its history.
         </p>
       ) : (
-        <FitCharts title={fit.title} units={fit.units} builds={fit.builds} />
+        <FitCharts
+          title={fit.title}
+          units={fit.units}
+          builds={fit.builds}
+          evidence={fit.evidence}
+          likelyLimit={fit.likelyLimit}
+        />
       )}
       <PastDecisions decisions={fit.decisions} />
       {fit.mayWrite ? (

@@ -1,5 +1,9 @@
+import { ConditionGlyph } from "~/components/drawings/condition-glyph";
 import { Table } from "~/components/ui/table";
+import type { Iteration } from "~/engineering/next-step/types";
+import { worstGrade } from "~/engineering/next-step/worst-grade";
 import { clearanceText, clearanceUnit, dayText, type PageUnits } from "~/engineering/quantity/figures";
+import { inWords } from "~/engineering/trade/condition";
 
 interface Decision {
   number: number;
@@ -17,7 +21,11 @@ interface Decision {
 const decided: Record<string, string> = { accept: "accepted", change: "changed", decline: "declined" };
 
 /** What was proposed and decided at each build, as a page shows it, newest first. */
-export function pastDecisions(decisions: readonly Decision[], units: PageUnits) {
+export function pastDecisions(
+  decisions: readonly Decision[],
+  iterations: readonly Iteration[],
+  units: PageUnits,
+) {
   return {
     unit: clearanceUnit(units),
     rows: decisions
@@ -29,9 +37,17 @@ export function pastDecisions(decisions: readonly Decision[], units: PageUnits) 
         signed: row.signedPm === null ? "" : clearanceText(row.signedPm, units),
         by: row.personName ? `${row.personName}, ${dayText(row.signedAt!)}` : "",
         reason: row.reason ?? "",
+        outcome: outcomeAfter(row.number, iterations),
       }))
       .reverse(),
   };
+}
+
+/** How the build after a decision came down: its worst grade and what happened in it. */
+function outcomeAfter(build: number, iterations: readonly Iteration[]) {
+  const next = iterations.find((iteration) => iteration.build > build);
+  if (!next) return undefined;
+  return { build: next.build, grade: worstGrade(next), events: next.events.map(inWords).join(", ") };
 }
 
 /** The table of them. */
@@ -48,6 +64,7 @@ export function PastDecisions({ decisions }: { decisions: ReturnType<typeof past
           <th scope="col">signed, {decisions.unit}</th>
           <th scope="col">by</th>
           <th scope="col">reason</th>
+          <th scope="col">the build after</th>
         </tr>
       </thead>
       <tbody>
@@ -60,6 +77,16 @@ export function PastDecisions({ decisions }: { decisions: ReturnType<typeof past
             <td>{row.signed}</td>
             <td className="words">{row.by}</td>
             <td className="words">{row.reason}</td>
+            <td className="words">
+              {row.outcome ? (
+                <span className="flex items-center gap-2">
+                  {row.outcome.grade !== undefined && <ConditionGlyph grade={row.outcome.grade} />}
+                  {row.outcome.events}
+                </span>
+              ) : (
+                "not torn down yet"
+              )}
+            </td>
           </tr>
         ))}
       </tbody>

@@ -2,8 +2,10 @@ import { clearanceText, clearanceUnit, diameterText, type PageUnits } from "~/en
 import { picometres } from "~/engineering/quantity/length";
 import type { Station } from "~/engineering/trade/fit-kinds";
 import { Drawing } from "./drawing";
+import { lineWeight } from "./line-weight";
 import { place } from "./scale";
 import { at, axisAngles, diameterAround, outline } from "./section-shape";
+import { Figure, Words } from "./text";
 
 type Axis = Station["axis"];
 
@@ -34,7 +36,7 @@ const axisNames: Record<Axis, string> = {
   b: "B",
 };
 
-const width = 460;
+const width = 480;
 const height = 346;
 const centreX = width / 2;
 const centreY = 172;
@@ -95,16 +97,14 @@ export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [
       )}
       <path
         d={boreOutline}
-        fill="none"
-        stroke="var(--bronze)"
-        strokeWidth="2"
+        strokeWidth={lineWeight.strong}
+        className="fill-none stroke-bronze"
         strokeDasharray={bore.length === 0 ? "4 4" : undefined}
       />
       <path
         d={outline(centreX, centreY, radius(journal, journalRadius))}
-        fill="var(--plate-deep)"
-        stroke="var(--ink)"
-        strokeWidth="1.5"
+        strokeWidth={lineWeight.mark}
+        className="fill-plate-deep stroke-ink"
         strokeDasharray={journal.length === 0 ? "4 4" : undefined}
       />
       <path
@@ -118,9 +118,9 @@ export function BoreView({ title, units, bore, journal, nominal, boreAsBuilt = [
       {journal.map(({ axis, value }) => (
         <JournalAxis key={axis} axis={axis} text={figure(value)} />
       ))}
-      <text x={centreX} y={height - 6} textAnchor="middle" fontSize="11" fill="var(--mute)">
-        {`clearance drawn ${Number(larger.toPrecision(2))} times larger; between the axes not measured`}
-      </text>
+      <Words x={centreX} y={height - 6} anchor="middle">
+        {`${bore.length > 0 && journal.length > 0 ? "clearance" : "shape"} drawn ${Number(larger.toPrecision(2))} times larger; between the axes not measured`}
+      </Words>
     </Drawing>
   );
 }
@@ -142,17 +142,17 @@ function BoreAxis({ reading, radius, text }: BoreAxisProps) {
   };
   const [across, up] = at(angle, outerRadius + 9);
   const anchor = angle === 90 ? "middle" : angle > 90 ? "end" : "start";
-  const x = place(centreX + across);
-  const y = place(centreY - up) - (angle === 90 ? 14 : 6);
+  const x = centreX + across;
+  const y = centreY - up - (angle === 90 ? 14 : 6);
   return (
-    <g fontSize="11" textAnchor={anchor}>
-      <path d={tick(angle) + tick(angle + 180)} stroke="var(--ink)" fill="none" />
-      <text x={x} y={y} fill="var(--mute)">
+    <g>
+      <path d={tick(angle) + tick(angle + 180)} strokeWidth={lineWeight.hair} className="stroke-ink" />
+      <Words x={x} y={y} anchor={anchor}>
         {axisNames[reading.axis]}
-      </text>
-      <text x={x} y={y + 13} fill="var(--ink)" className="font-mono">
+      </Words>
+      <Figure x={x} y={y + 14} anchor={anchor} tone="ink">
         {text}
-      </text>
+      </Figure>
     </g>
   );
 }
@@ -161,27 +161,18 @@ function BoreAxis({ reading, radius, text }: BoreAxisProps) {
 function JournalAxis({ axis, text }: { axis: Axis; text: string }) {
   const angle = axisAngles[axis];
   const [across, up] = at(angle, journalRadius - 12);
-  const [textAcross, textUp] = at(angle, 46);
+  const isUpright = angle === 90;
   return (
-    <g fontSize="11">
+    <g>
       <path
         d={`M${place(centreX - across)} ${place(centreY + up)}L${place(centreX + across)} ${place(centreY - up)}`}
-        stroke="var(--line-strong)"
         strokeDasharray="10 3 2 3"
-        strokeWidth=".8"
+        strokeWidth={lineWeight.hair}
+        className="stroke-line-strong"
       />
-      <text
-        x={place(centreX + textAcross)}
-        y={place(centreY - textUp) - (angle === 90 ? 0 : 6)}
-        textAnchor="middle"
-        fill="var(--ink)"
-        stroke="var(--plate-deep)"
-        strokeWidth="4"
-        paintOrder="stroke"
-        className="font-mono"
-      >
-        {axisNames[axis]} {text}
-      </text>
+      <Figure x={centreX + (isUpright ? 6 : 12)} y={centreY - (isUpright ? 40 : 7)} tone="ink" size={11}>
+        {`${axisNames[axis]} ${text}`}
+      </Figure>
     </g>
   );
 }

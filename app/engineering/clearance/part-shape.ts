@@ -1,5 +1,4 @@
-import type { Station } from "../trade/fit-kinds";
-import { meanOf, type StationMean } from "./station-means";
+import type { StationMean } from "./station-means";
 
 /** The form of a part along its length. A bell-mouthed guide, wide at both ends, is an hourglass. */
 export type Shape = "barrel" | "hourglass" | "even";
@@ -7,10 +6,10 @@ export type Shape = "barrel" | "hourglass" | "even";
 /** How far a bore or a journal is from a cylinder, m; absent where too little is measured. */
 export interface PartShape {
   /** Largest difference of two axes in one plane. */
-  outOfRound?: number;
+  outOfRound: number | undefined;
   /** Front less rear: positive where the front is larger. */
-  taper?: number;
-  shape?: Shape;
+  taper: number | undefined;
+  shape: Shape | undefined;
 }
 
 // A picometre is finer than anything measured: what differs by less is the same after a sum of floats.
@@ -19,32 +18,32 @@ const same = 1e-12;
 /** The shape of one part from its stations. Planes are compared on the axes that both have, so that out-of-round does
  * not pass for taper. */
 export function partShape(stations: readonly StationMean[]): PartShape {
-  const spreads = (["front", "middle", "rear"] as const).flatMap((plane) => {
-    const values = stations.filter((station) => station.plane === plane).map(({ value }) => value);
-    return values.length > 1 ? [Math.max(...values) - Math.min(...values)] : [];
-  });
-  const taper = planeDifference(stations, "front", "rear");
-  const shape = shapeAlong(
-    planeDifference(stations, "middle", "front"),
-    planeDifference(stations, "middle", "rear"),
-  );
+  const front = stations.filter(({ plane }) => plane === "front");
+  const middle = stations.filter(({ plane }) => plane === "middle");
+  const rear = stations.filter(({ plane }) => plane === "rear");
+  const measuredRound = [front, middle, rear].filter((plane) => plane.length > 1);
   return {
-    ...(spreads.length > 0 && { outOfRound: Math.max(...spreads) }),
-    ...(taper !== undefined && { taper }),
-    ...(shape && { shape }),
+    outOfRound: measuredRound.length > 0 ? Math.max(...measuredRound.map(rangeOf)) : undefined,
+    taper: difference(front, rear),
+    shape: shapeAlong(difference(middle, front), difference(middle, rear)),
   };
 }
 
-function planeDifference(
-  stations: readonly StationMean[],
-  plane: Station["plane"],
-  other: Station["plane"],
-): number | undefined {
-  const at = (which: Station["plane"], axis: Station["axis"]) =>
-    stations.find((station) => station.plane === which && station.axis === axis);
-  const shared = stations.filter((station) => station.plane === plane && at(other, station.axis));
-  if (shared.length === 0) return undefined;
-  return meanOf(shared) - meanOf(shared.map(({ axis }) => at(other, axis)!));
+function rangeOf(stations: readonly StationMean[]): number {
+  const values = stations.map(({ value }) => value);
+  return Math.max(...values) - Math.min(...values);
+}
+
+function difference(plane: readonly StationMean[], other: readonly StationMean[]): number | undefined {
+  let sum = 0;
+  let shared = 0;
+  for (const { axis, value } of plane) {
+    const opposite = other.find((station) => station.axis === axis);
+    if (!opposite) continue;
+    sum += value - opposite.value;
+    shared += 1;
+  }
+  return shared > 0 ? sum / shared : undefined;
 }
 
 function shapeAlong(overFront: number | undefined, overRear: number | undefined): Shape | undefined {

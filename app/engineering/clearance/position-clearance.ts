@@ -52,16 +52,21 @@ export function positionClearance(readings: PositionReadings): PositionClearance
   const journal = stationMeans(readings.journal, readings.journalExpansion, "journal");
   const boreShape = partShape(bore);
   const journalShape = partShape(journal);
-  const vertical = verticalClearance(bore, journal);
   const extremes = extremeClearances(bore, journal);
   return {
-    ...(vertical !== undefined && { vertical }),
-    ...extremes,
-    ...(bore.length > 0 && { bore: meanOf(bore) }),
-    ...(journal.length > 0 && { journal: meanOf(journal) }),
-    ...named("bore", boreShape),
-    ...named("journal", journalShape),
-    at20: [...bore, ...journal].every((station) => station.at20),
+    vertical: verticalClearance(bore, journal),
+    least: extremes.least,
+    most: extremes.most,
+    mean: extremes.mean,
+    bore: meanIfAny(bore),
+    journal: meanIfAny(journal),
+    boreOutOfRound: boreShape.outOfRound,
+    journalOutOfRound: journalShape.outOfRound,
+    boreTaper: boreShape.taper,
+    journalTaper: journalShape.taper,
+    boreShape: boreShape.shape,
+    journalShape: journalShape.shape,
+    at20: bore.every((station) => station.at20) && journal.every((station) => station.at20),
     interference: (extremes.least ?? 0) < 0,
     missing: [
       ...missingOf("bore", bore, boreShape),
@@ -73,12 +78,8 @@ export function positionClearance(readings: PositionReadings): PositionClearance
   };
 }
 
-function named(feature: "bore" | "journal", { outOfRound, taper, shape }: PartShape) {
-  return {
-    ...(outOfRound !== undefined && { [`${feature}OutOfRound`]: outOfRound }),
-    ...(taper !== undefined && { [`${feature}Taper`]: taper }),
-    ...(shape && { [`${feature}Shape`]: shape }),
-  };
+function meanIfAny(stations: readonly StationMean[]): number | undefined {
+  return stations.length > 0 ? meanOf(stations) : undefined;
 }
 
 function extremeClearances(
@@ -107,13 +108,15 @@ function verticalClearance(
 ): number | undefined {
   const across = loadLine(bore);
   if (across.length === 0 || journal.length === 0) return undefined;
-  const planes = (["front", "middle", "rear"] as const).flatMap((plane) => {
-    const bores = across.filter((station) => station.plane === plane);
-    const journals = journal.filter((station) => station.plane === plane);
-    return bores.length > 0 && journals.length > 0 ? [meanOf(bores) - meanOf(journals)] : [];
-  });
-  if (planes.length === 0) return meanOf(across) - meanOf(journal);
-  return planes.reduce((sum, clearance) => sum + clearance, 0) / planes.length;
+  const shared = across.filter(({ plane }) => journal.some((station) => station.plane === plane));
+  if (shared.length === 0) return meanOf(across) - meanOf(journal);
+  const planes = new Set(shared.map(({ plane }) => plane));
+  let sum = 0;
+  for (const plane of planes) {
+    const inPlane = (station: StationMean) => station.plane === plane;
+    sum += meanOf(shared.filter(inPlane)) - meanOf(journal.filter(inPlane));
+  }
+  return sum / planes.size;
 }
 
 function missingOf(

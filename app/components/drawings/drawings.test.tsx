@@ -29,13 +29,33 @@ test("a condition says its grade and its word", () => {
 });
 
 test("each grade breaks more of the shell's face", () => {
-  const pieces = [0, 2, 3, 4].map((grade) => {
+  const pieces = [0, 1, 2, 3, 4].map((grade) => {
+    const { container } = render(<ConditionGlyph grade={grade} />);
+    // Each piece is an arc of its own in the one path that is drawn in the grade's colour and the arc's weight.
+    const face = container.querySelectorAll("path")[1]?.getAttribute("d") ?? "";
+    return face.match(/A/g)?.length;
+  });
+  expect(pieces).toEqual([1, 1, 2, 3, 4]);
+});
+
+test("as new and normal polish are told apart without their number: one has the line of its polish", () => {
+  const paths = [0, 1].map((grade) => {
     const { container } = render(<ConditionGlyph grade={grade} />);
     return container.querySelectorAll("path").length;
   });
-  // Grade 0 is whole with a line inside it.
-  expect(pieces).toEqual([2, 2, 3, 4]);
+  expect(paths).toEqual([2, 3]);
 });
+
+test("with its word beside it, a condition is not read twice", () => {
+  const { container } = render(<ConditionGlyph grade={2} word />);
+  expect(screen.getByRole("img").getAttribute("aria-label")).toBe("grade 2");
+  expect(container.textContent).toContain("marked");
+});
+
+/** What someone who cannot see a drawing is told. */
+function summaryOf(drawing: Element): string {
+  return document.getElementById(drawing.getAttribute("aria-describedby")!)?.textContent ?? "";
+}
 
 test("the fit strip says its figures in words and in a table", () => {
   render(
@@ -50,22 +70,22 @@ test("the fit strip says its figures in words and in a table", () => {
       step={{ from: 0.0025 * inch, to: 0.0023 * inch }}
     />,
   );
-  const name = screen.getByRole("img").getAttribute("aria-label");
+  const name = summaryOf(screen.getByRole("img", { name: "Big ends" }));
   expect(name).toContain("Aim .00250 in, window .00220 to .00280");
   expect(name).toContain("2 positions as built from .00240 to .00250");
   expect(name).toContain("7 in 10 that the limit lies from .00160 to .00190");
-  expect(name).toContain("next step from .00250 to .00230");
+  expect(name).toContain("next step: close by .00020, from .00250 to .00230");
   const rows = within(screen.getByRole("table", { hidden: true })).getAllByRole("row", { hidden: true });
   expect(rows.map((row) => [...row.children].map((cell) => cell.textContent))).toEqual([
-    ["position", "as built, in", "torn down, in"],
-    ["1", ".00250", ".00260"],
-    ["2", ".00240", "–"],
+    ["position", "as built, in", "torn down, in", "wear, in"],
+    ["1", ".00250", ".00260", ".00010"],
+    ["2", ".00240", "–", "–"],
   ]);
 });
 
 test("the page's units run through the whole strip", () => {
   render(<FitStrip {...strip} units="metric" positions={[{ number: 1, assembled: 0.0025 * inch }]} />);
-  expect(screen.getByRole("img").getAttribute("aria-label")).toContain("Aim 63.5 µm");
+  expect(summaryOf(screen.getByRole("img"))).toContain("Aim 63.5 µm");
 });
 
 test.each([
@@ -99,7 +119,7 @@ test("wear that the gauges cannot see is said with its bound, and the odd one ou
   expect(drawing.textContent).toContain("not measurable, under 0.110 µm/h");
   expect(drawing.textContent).toContain("odd one out");
   expect(drawing.textContent).toContain("a measuring slip");
-  expect(drawing.getAttribute("aria-label")).toContain("position 3 is the odd one out");
+  expect(summaryOf(drawing)).toContain("position 3 is the odd one out");
 });
 
 test("clearance by build stands with no build, one build, and equal values", () => {

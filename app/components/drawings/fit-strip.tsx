@@ -1,188 +1,164 @@
-import {
-  clearanceText,
-  clearanceUnit,
-  clearanceUnitName,
-  type PageUnits,
-} from "~/engineering/quantity/figures";
+import { useId } from "react";
+import { clearanceText, clearanceUnit } from "~/engineering/quantity/figures";
 import { picometres } from "~/engineering/quantity/length";
-import { fromCore } from "~/engineering/quantity/units";
+import { BottomAxis } from "./axis";
+import { clearanceTicks } from "./clearance-axis";
 import { Drawing } from "./drawing";
-import { linearScale, niceTicks, place } from "./scale";
+import {
+  HardLimits,
+  LikelyLimit,
+  OffScale,
+  PositionMark,
+  type StripFrame,
+  StripStep,
+  TargetWindow,
+} from "./fit-strip-marks";
+import { inTen, type StripFigures, stepWords, stripSummary, stripTable } from "./fit-strip-words";
+import { linearScale, type Span } from "./scale";
+import { Words } from "./text";
 
-interface StripPosition {
-  number: number;
-  /** Clearances in m. */
-  assembled?: number | undefined;
-  tornDown?: number | undefined;
-}
-
-interface FitStripProps {
+interface FitStripProps extends StripFigures {
   title: string;
-  units: PageUnits;
-  /** All in m. */
-  window: { least: number; aim: number; most: number };
-  limits: { least: number; most: number };
-  positions: readonly StripPosition[];
-  likelyLimit?: { from: number; to: number; share: number } | undefined;
-  step?: { from: number; to: number } | undefined;
+  /** Never left: beyond them the strip is hatched. In m. */
+  limits?: { least: number; most: number } | undefined;
+  /** `line` stands in a row of a list and has no letters; `strip` has its scale; `full` numbers the positions. */
+  size?: "line" | "strip" | "full";
 }
 
-const width = 730;
-const left = 20;
-const right = 710;
+const sizes = {
+  line: { width: 300, side: 4, row: 4, radius: 2, spare: 4, step: 14 },
+  strip: { width: 730, side: 22, row: 7, radius: 2.8, spare: 8, step: 24 },
+  full: { width: 730, side: 22, row: 13, radius: 3.4, spare: 10, step: 24 },
+} as const;
 
 /**
  * A fit on one scale: its window, its hard limits, each position as built (solid) and as torn down (open) with its wear
  * between, where the limit probably lies, and the next step.
  */
-export function FitStrip({ title, units, window, limits, positions, likelyLimit, step }: FitStripProps) {
-  const shown = positions.filter(
+export function FitStrip({ title, limits, size = "full", ...figures }: FitStripProps) {
+  const { units, window, likelyLimit, step } = figures;
+  const id = useId();
+  const { width, side, row, radius, spare, step: stepHeight } = sizes[size];
+  const lettered = size !== "line";
+  const shown = figures.positions.filter(
     ({ assembled, tornDown }) => assembled !== undefined || tornDown !== undefined,
   );
-  const values = shown.flatMap(({ assembled, tornDown }) => [
-    assembled ?? window.aim,
-    tornDown ?? window.aim,
-  ]);
-  const margin = Math.max((limits.most - limits.least) * 0.06, 1e-6);
-  const from = Math.min(limits.least, ...values) - margin;
-  const to = Math.max(limits.most, ...values) + margin;
-  const x = linearScale(from, to, left, right);
-  const unit = clearanceUnitName(units);
-  const scaleFactor = 1 / fromCore(1, unit);
-  const ticks = niceTicks(from / scaleFactor, to / scaleFactor, 8).map((tick) => tick * scaleFactor);
+  const span = spanOfStrip(figures, limits);
 
-  const top = 18;
-  const rowHeight = 7;
-  const stepHeight = step ? 18 : 6;
-  const floor = top + 10 + Math.max(4, shown.length) * rowHeight + stepHeight;
-  const text = (value: number) => clearanceText(picometres(value), units);
-  const band = (start: number, end: number) => ({
-    x: place(x(start)),
-    width: place(Math.max(0, x(end) - x(start))),
-  });
-  const id = title.replaceAll(/[^a-z0-9]+/gi, "-");
+  const top = lettered && likelyLimit ? 24 : 6;
+  const floor = top + spare + Math.max(3, shown.length) * row + (step ? stepHeight : spare) + spare;
+  const left = side;
+  const right = width - side;
+  const scale = linearScale(span.from, span.to, left, right);
+  const x = (value: number) => Math.min(right, Math.max(left, scale(value)));
+  const frame: StripFrame = { left, right, top, floor, x, id };
 
   return (
     <Drawing
       title={title}
-      summary={summaryOf({ units, window, positions: shown, likelyLimit, step, text })}
+      summary={stripSummary({ ...figures, positions: shown })}
       width={width}
-      height={floor + 26}
-      table={{
-        head: ["position", `as built, ${clearanceUnit(units)}`, `torn down, ${clearanceUnit(units)}`],
-        rows: shown.map(({ number, assembled, tornDown }) => [
-          number,
-          assembled === undefined ? "–" : text(assembled),
-          tornDown === undefined ? "–" : text(tornDown),
-        ]),
-      }}
+      height={lettered ? floor + 42 : floor + 8}
+      leastWidth={lettered ? undefined : 200}
+      table={lettered && shown.length > 0 ? stripTable({ ...figures, positions: shown }) : undefined}
     >
-      <defs>
-        <pattern
-          id={`${id}-hatch`}
-          width="6"
-          height="6"
-          patternUnits="userSpaceOnUse"
-          patternTransform="rotate(45)"
-        >
-          <path d="M0 0V6" stroke="var(--line)" strokeWidth="2" />
-        </pattern>
-        <linearGradient id={`${id}-limit`}>
-          <stop offset="0" stopColor="var(--stop)" stopOpacity="0" />
-          <stop offset=".5" stopColor="var(--stop)" stopOpacity=".35" />
-          <stop offset="1" stopColor="var(--stop)" stopOpacity="0" />
-        </linearGradient>
-      </defs>
-      <rect {...band(from, limits.least)} y={top} height={floor - top} fill={`url(#${id}-hatch)`} />
-      <rect {...band(limits.most, to)} y={top} height={floor - top} fill={`url(#${id}-hatch)`} />
-      <rect {...band(window.least, window.most)} y={top} height={floor - top} fill="var(--plate-deep)" />
+      {limits && <HardLimits frame={frame} limits={limits} />}
+      <TargetWindow frame={frame} window={window} />
       {likelyLimit && (
-        <g>
-          <rect
-            {...band(likelyLimit.from, likelyLimit.to)}
-            y={top}
-            height={floor - top}
-            fill={`url(#${id}-limit)`}
-          />
-          <text
-            x={Math.min(Math.max(place(x((likelyLimit.from + likelyLimit.to) / 2)), 110), 620)}
-            y={12}
-            textAnchor="middle"
-            fontSize="11"
-            fill="var(--stop)"
-          >
-            limit probably here, {Math.round(likelyLimit.share * 10)} in 10
-          </text>
-        </g>
+        <LikelyLimit
+          frame={frame}
+          from={likelyLimit.from}
+          to={likelyLimit.to}
+          label={lettered ? `limit probably here, ${inTen(likelyLimit.share)}` : undefined}
+        />
       )}
-      {shown.map(({ number, assembled, tornDown }, index) => {
-        const y = top + 9 + index * rowHeight;
-        return (
-          <g key={number} stroke="var(--bronze)">
-            {assembled !== undefined && tornDown !== undefined && (
-              <path d={`M${place(x(assembled))} ${y}H${place(x(tornDown))}`} strokeWidth="1.4" />
-            )}
-            {assembled !== undefined && (
-              <circle cx={place(x(assembled))} cy={y} r="2.6" fill="var(--bronze)" />
-            )}
-            {tornDown !== undefined && (
-              <circle cx={place(x(tornDown))} cy={y} r="2.6" fill="var(--plate)" strokeWidth="1.3" />
-            )}
-          </g>
+      {shown.map((position, index) => {
+        const y = top + spare + (index + 0.5) * row;
+        const away = [position.assembled, position.tornDown].find(
+          (value) => value !== undefined && (value < span.from || value > span.to),
+        );
+        return away === undefined ? (
+          <PositionMark
+            key={position.number}
+            frame={frame}
+            position={position}
+            y={y}
+            radius={radius}
+            numbered={size === "full"}
+          />
+        ) : (
+          <OffScale
+            key={position.number}
+            frame={frame}
+            y={y}
+            side={away < span.from ? "left" : "right"}
+            text={
+              lettered
+                ? `${position.number}, off this scale: ${clearanceText(picometres(away), units)}`
+                : undefined
+            }
+          />
         );
       })}
-      {step && <Step from={x(step.from)} to={x(step.to)} floor={floor} />}
-      <path d={`M${place(x(window.aim))} ${floor}l-5 -9h10z`} fill="var(--bronze)" />
-      <path d={`M${left} ${floor}H${right}`} stroke="var(--line-strong)" />
-      {ticks.map((tick) => (
-        <g key={tick}>
-          <path d={`M${place(x(tick))} ${floor}v7`} stroke="var(--line-strong)" />
-          <text
-            x={place(x(tick))}
-            y={floor + 20}
-            textAnchor="middle"
-            fontSize="11"
-            fill="var(--mute)"
-            className="font-mono"
-          >
-            {clearanceText(picometres(tick), units, -1)}
-          </text>
-        </g>
-      ))}
+      {step && <StripStep frame={frame} {...step} label={lettered ? stepWords(step, units) : undefined} />}
+      <BottomAxis
+        ticks={lettered ? clearanceTicks(span, units, 8) : []}
+        scale={x}
+        from={left}
+        to={right}
+        floor={floor}
+        label={lettered ? `clearance at 20 °C, ${clearanceUnit(units)}` : undefined}
+      />
+      {lettered && <Key x={left} y={floor + 36} radius={radius} />}
     </Drawing>
   );
 }
 
-function Step({ from, to, floor }: { from: number; to: number; floor: number }) {
-  const y = floor - 14;
-  const back = to < from ? 8 : -8;
+/**
+ * The hard limits with some air, or the window with as much again on both sides, and every clearance that is not far
+ * beyond them: one slip of the hand must not squeeze the others together.
+ */
+function spanOfStrip(
+  { window, positions, likelyLimit, step }: StripFigures,
+  limits: FitStripProps["limits"],
+): Span {
+  const half = Math.max(window.most - window.least, 2e-6);
+  const ends = [limits?.least ?? window.least - half, limits?.most ?? window.most + half];
+  const least = Math.min(...ends);
+  const most = Math.max(...ends);
+  const reach = Math.max(most - least, 2e-6) * 0.5;
+  const values = [
+    least,
+    most,
+    window.least,
+    window.most,
+    ...(likelyLimit ? [likelyLimit.from, likelyLimit.to] : []),
+    ...(step ? [step.from, step.to] : []),
+    ...positions.flatMap(({ assembled, tornDown }) => [assembled ?? window.aim, tornDown ?? window.aim]),
+  ].filter((value) => value >= least - reach && value <= most + reach);
+  const from = Math.min(...values);
+  const to = Math.max(...values);
+  const air = (to - from) * 0.07;
+  return { from: from - air, to: to + air };
+}
+
+/** What the marks mean. */
+function Key({ x, y, radius }: { x: number; y: number; radius: number }) {
+  const middle = y - 4;
   return (
     <g>
-      <path d={`M${place(from)} ${y}H${place(to + back)}`} stroke="var(--layout)" strokeWidth="2.5" />
-      <path d={`M${place(to)} ${y}l${back} -5v10z`} fill="var(--layout)" />
-      <path d={`M${place(to)} ${floor}v-10`} stroke="var(--layout)" strokeWidth="2" />
+      <circle cx={x + 3} cy={middle} r={radius} className="fill-bronze" />
+      <Words x={x + 11} y={y}>
+        as built
+      </Words>
+      <circle cx={x + 76} cy={middle} r={radius} strokeWidth="1.5" className="fill-plate stroke-bronze" />
+      <Words x={x + 84} y={y}>
+        torn down
+      </Words>
+      <path d={`M${x + 158} ${y}l-5.5 -9h11z`} className="fill-bronze" />
+      <Words x={x + 168} y={y}>
+        aim
+      </Words>
     </g>
   );
-}
-
-interface SummaryInput extends Pick<FitStripProps, "units" | "window" | "likelyLimit" | "step"> {
-  positions: readonly StripPosition[];
-  text: (value: number) => string;
-}
-
-function summaryOf({ units, window, positions, likelyLimit, step, text }: SummaryInput): string {
-  const unit = clearanceUnit(units);
-  const built = positions.flatMap(({ assembled }) => assembled ?? []);
-  return [
-    `Aim ${text(window.aim)} ${unit}, window ${text(window.least)} to ${text(window.most)}`,
-    built.length > 0
-      ? `${built.length} positions as built from ${text(Math.min(...built))} to ${text(Math.max(...built))}`
-      : "no position measured yet",
-    likelyLimit &&
-      `${Math.round(likelyLimit.share * 10)} in 10 that the limit lies from ${text(likelyLimit.from)} to ${text(likelyLimit.to)}`,
-    step && `next step from ${text(step.from)} to ${text(step.to)}`,
-  ]
-    .filter(Boolean)
-    .join("; ")
-    .concat(".");
 }

@@ -1,6 +1,9 @@
 import { Link } from "react-router";
+import { clearanceText, type PageUnits } from "~/engineering/quantity/figures";
+import { picometres } from "~/engineering/quantity/length";
 import { inWords } from "~/engineering/trade/condition";
 import { ConditionGlyph } from "./condition-glyph";
+import { oilTone } from "./oil-tone";
 
 interface Rung {
   id: string;
@@ -11,51 +14,100 @@ interface Rung {
   /** Kinematic viscosity of the oil at 100 °C, mm²/s: it colours the rung, thin pale and thick dark. */
   kv100?: number | undefined;
   grade?: number | undefined;
+  /** What happened in its runs, such as debris. */
   events: readonly string[];
+  /** Signed change of the aim from the build before, m; 0 where it was held. */
+  step?: number | undefined;
   to: string;
 }
 
 interface LadderProps {
   title: string;
+  /** Newest first. */
   rungs: readonly Rung[];
   /** The build this page is about. */
   current?: string;
+  /** In which the steps are written. */
+  units?: PageUnits;
 }
 
-// SAE J300: under 12.5 mm²/s at 100 °C is a 30 or thinner, from 16.3 a 50 or thicker.
-function oilTone(kv100: number | undefined): string {
-  if (kv100 === undefined) return "var(--line)";
-  if (kv100 < 12.5) return "var(--oil-thin)";
-  return kv100 < 16.3 ? "var(--oil-middle)" : "var(--oil-thick)";
-}
-
-/** An engine's history as a ladder, the newest rung on top: hours, oil, worst grade, what happened. */
-export function Ladder({ title, rungs, current }: LadderProps) {
+/** A history as a ladder, the newest rung on top: hours, oil, worst grade, what happened, and the step from rung to rung. */
+export function Ladder({ title, rungs, current, units = "inch" }: LadderProps) {
   return (
     <nav aria-label={title}>
       <h2 className="mb-2 text-lg font-semibold">{title}</h2>
-      <ol className="grid">
+      {rungs.length === 0 && (
+        <p className="text-mute">No build yet: its first rung comes with the first build.</p>
+      )}
+      <ol>
         {rungs.map((rung) => (
-          <li key={rung.id} className="grid grid-cols-[4.5rem_5rem_minmax(0,1fr)] items-center gap-2">
+          <li
+            key={rung.id}
+            className="relative grid grid-cols-[4.25rem_5.5rem_minmax(0,1fr)] gap-x-2.5 hover:bg-plate-deep"
+          >
             <Link
               to={rung.to}
               aria-current={rung.id === current ? "page" : undefined}
-              className="flex min-h-12 items-center aria-[current=page]:font-semibold aria-[current=page]:text-layout"
+              className="flex h-12 items-center justify-end after:absolute after:inset-0 aria-[current=page]:font-semibold aria-[current=page]:text-layout"
             >
               Build {rung.build}
             </Link>
-            <span className="flex min-h-12 flex-col justify-center border-x-2 border-line text-center font-mono text-[11px] text-mute">
-              {rung.hours > 0 ? `${rung.hours.toFixed(1)} h` : "–"}
-              <span aria-hidden="true" className="block h-1.5" style={{ background: oilTone(rung.kv100) }} />
-              {rung.oil ?? "\u00a0"}
-            </span>
-            <span className="flex items-center gap-2 text-[13px] text-mute">
+            <RungOnRails rung={rung} units={units} />
+            <span className="flex h-12 items-center gap-2 text-dense leading-tight text-mute">
               {rung.grade !== undefined && <ConditionGlyph grade={rung.grade} />}
-              {rung.events.map(inWords).join(", ")}
+              <span>
+                {rung.oil && <span className="block font-mono text-[0.6875rem]">{rung.oil}</span>}
+                {wordsOf(rung)}
+              </span>
             </span>
           </li>
         ))}
       </ol>
     </nav>
+  );
+}
+
+function wordsOf({ events, grade, state }: Rung): string {
+  if (events.length > 0) return events.map(inWords).join(", ");
+  return grade === undefined ? inWords(state) : "";
+}
+
+/** The rung between its rails: its hours over it, the step that led to it from the rung below under it. */
+function RungOnRails({ rung, units }: { rung: Rung; units: PageUnits }) {
+  const { hours, kv100, step } = rung;
+  const hasRun = hours > 0;
+  return (
+    <span className="flex min-h-12 flex-col border-x-2 border-line text-center font-mono text-[0.6875rem] leading-none text-mute">
+      <span className="flex h-5 items-end justify-center pb-0.5">
+        {hasRun ? `${hours.toFixed(1)} h` : ""}
+      </span>
+      <span
+        aria-hidden="true"
+        className={`block h-[7px] border-y ${hasRun ? "border-bronze" : "border-dashed border-line-strong"}`}
+        style={hasRun ? { background: oilTone(kv100) } : undefined}
+      />
+      {step !== undefined && <StepBelow step={step} units={units} />}
+    </span>
+  );
+}
+
+function StepBelow({ step, units }: { step: number; units: PageUnits }) {
+  const by = picometres(Math.abs(step));
+  const [word, colour, arrow] =
+    by === 0
+      ? ["held", "", "M2 4h8"]
+      : step < 0
+        ? ["closed", "text-layout", "M11 4H2M5 1L2 4l3 3"]
+        : ["opened", "text-watch", "M1 4h9M7 1l3 3-3 3"];
+  return (
+    <span className={`flex items-center justify-center gap-1 pt-3 pb-2 font-sans text-[0.75rem] ${colour}`}>
+      <svg aria-hidden="true" viewBox="0 0 12 8" className="w-3 fill-none stroke-current stroke-[1.5]">
+        <path d={arrow} />
+      </svg>
+      <span>
+        {word}
+        {by !== 0 && <span className="font-mono"> {clearanceText(by, units, -1)}</span>}
+      </span>
+    </span>
   );
 }

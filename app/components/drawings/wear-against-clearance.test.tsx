@@ -31,7 +31,7 @@ test("the tighter build lies left of the looser one, the faster wear above the s
   const { container } = render(<WearAgainstClearance title="Big ends" units="inch" points={points} />);
   const place = (build: number) => {
     const label = [...container.querySelectorAll("text")].find(
-      (text) => text.textContent === `build ${build}`,
+      (text) => text.textContent === String(build) && text.classList.contains("fill-mute"),
     )!;
     return { x: Number(label.getAttribute("x")), y: Number(label.getAttribute("y")) };
   };

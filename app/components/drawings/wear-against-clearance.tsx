@@ -1,18 +1,20 @@
-import {
-  clearanceText,
-  clearanceUnit,
-  clearanceUnitName,
-  type PageUnits,
-} from "~/engineering/quantity/figures";
+import { useId } from "react";
+import { clearanceText, clearanceUnit, type PageUnits } from "~/engineering/quantity/figures";
 import { picometres } from "~/engineering/quantity/length";
-import { fromCore } from "~/engineering/quantity/units";
-import { GlyphShape } from "./condition-glyph";
+import { BottomAxis, LeftAxis } from "./axis";
+import { BuildMarks } from "./build-marks";
+import { clearanceTicks } from "./clearance-axis";
 import { Drawing } from "./drawing";
-import { linearScale, niceTicks, place } from "./scale";
+import { LikelyLimit } from "./fit-strip-marks";
+import { inTen } from "./fit-strip-words";
+import { lineWeight } from "./line-weight";
+import { linearScale, place, spanOf } from "./scale";
+import { Words } from "./text";
+import { wearText, wearTicks, wearUnit } from "./wear-axis";
 
 interface WearPoint {
   build: number;
-  /** Clearance as built, m. */
+  /** Mean as built, m. */
   clearance: number;
   /** Wear per hour, m/h, and how far either side of it the truth may lie. */
   rate: number;
@@ -27,164 +29,124 @@ interface WearAgainstClearanceProps {
   likelyLimit?: { from: number; to: number; share: number } | undefined;
 }
 
-const width = 560;
-const height = 300;
-const left = 66;
+const width = 640;
+const left = 62;
 const right = width - 14;
-const top = 34;
-const floor = height - 42;
+const top = 56;
+const floor = 320;
 
-/** Wear per hour against the clearance it ran at, one point a build: where it starts to rise, the limit is near. */
+/** Wear per hour against clearance, a build a mark: where it rises, the limit is near. */
 export function WearAgainstClearance({ title, units, points, likelyLimit }: WearAgainstClearanceProps) {
+  const id = useId();
   if (points.length === 0) return null;
-  const clearances = points.map(({ clearance }) => clearance);
-  if (likelyLimit) clearances.push(likelyLimit.from, likelyLimit.to);
-  const margin = Math.max((Math.max(...clearances) - Math.min(...clearances)) * 0.1, 2e-6);
-  const least = Math.min(...clearances) - margin;
-  const most = Math.max(...clearances) + margin;
-  const lowest = Math.min(0, ...points.map(({ rate, uncertainty }) => rate - uncertainty));
-  const highest = Math.max(1e-8, ...points.map(({ rate, uncertainty }) => rate + uncertainty)) * 1.08;
-  const x = linearScale(least, most, left, right);
-  const y = linearScale(lowest, highest, floor, top);
-  const metresPerUnit = 1 / fromCore(1, clearanceUnitName(units));
-  const ticks = (from: number, to: number, count: number) =>
-    niceTicks(from / metresPerUnit, to / metresPerUnit, count).map((tick) => tick * metresPerUnit);
-  const clearance = (value: number) => clearanceText(picometres(value), units);
-  const rate = (value: number) => clearanceText(picometres(value), units, units === "inch" ? 1 : 2);
+  const clearances = spanOf(
+    [...points.map(({ clearance }) => clearance), ...(likelyLimit ? [likelyLimit.from, likelyLimit.to] : [])],
+    5e-6,
+    0.12,
+  );
+  const rates = spanOf(
+    [0, ...points.flatMap(({ rate, uncertainty }) => [rate - uncertainty, rate + uncertainty])],
+    1e-8,
+    0.1,
+  );
+  const x = linearScale(clearances.from, clearances.to, left, right);
+  const y = linearScale(rates.from, rates.to, floor, top);
   const unit = clearanceUnit(units);
-  const limitWords = likelyLimit && `limit probably here, ${Math.round(likelyLimit.share * 10)} in 10`;
-  const gradient = `${title.replaceAll(/[^a-z0-9]+/gi, "-")}-limit`;
-  const rates = points.map((point) => point.rate);
-
   return (
     <Drawing
       title={title}
-      summary={[
-        `${points.length} ${points.length === 1 ? "build" : "builds"}; wear from ${rate(Math.min(...rates))} to ${rate(Math.max(...rates))} ${unit}/h`,
-        likelyLimit &&
-          `${limitWords}: ${clearance(likelyLimit.from)} to ${clearance(likelyLimit.to)} ${unit}`,
-      ]
-        .filter(Boolean)
-        .join("; ")
-        .concat(".")}
+      summary={summaryOf(points, likelyLimit, units)}
       width={width}
-      height={height}
+      height={floor + 42}
       table={{
-        head: ["build", `clearance, ${unit}`, `wear, ${unit}/h`, `sure to ±, ${unit}/h`, "worst grade"],
-        rows: points.map((point) => [
-          `Build ${point.build}`,
-          clearance(point.clearance),
-          rate(point.rate),
-          rate(point.uncertainty),
-          point.grade ?? "–",
+        head: [
+          "build",
+          `clearance, ${unit}`,
+          `wear, ${wearUnit(units)}`,
+          `sure to ±, ${wearUnit(units)}`,
+          "worst grade",
+        ],
+        rows: points.map(({ build, clearance, rate, uncertainty, grade }) => [
+          `Build ${build}`,
+          clearanceText(picometres(clearance), units),
+          wearText(rate, units),
+          wearText(uncertainty, units),
+          grade ?? "–",
         ]),
       }}
     >
       {likelyLimit && (
-        <g>
-          <linearGradient id={gradient}>
-            <stop offset="0" stopColor="var(--stop)" stopOpacity="0" />
-            <stop offset=".5" stopColor="var(--stop)" stopOpacity=".35" />
-            <stop offset="1" stopColor="var(--stop)" stopOpacity="0" />
-          </linearGradient>
-          <rect
-            x={place(x(likelyLimit.from))}
-            width={place(Math.max(0, x(likelyLimit.to) - x(likelyLimit.from)))}
-            y={top}
-            height={floor - top}
-            fill={`url(#${gradient})`}
-          />
-          <text
-            x={Math.min(Math.max(place(x((likelyLimit.from + likelyLimit.to) / 2)), left + 72), right - 72)}
-            y={top - 6}
-            textAnchor="middle"
-            fontSize="11"
-            fill="var(--stop)"
-          >
-            {limitWords}
-          </text>
-        </g>
-      )}
-      {ticks(lowest, highest, 5).map((tick) => (
-        <g key={tick}>
-          <path d={`M${left} ${place(y(tick))}H${right}`} stroke="var(--line)" />
-          <text
-            x={left - 8}
-            y={place(y(tick)) + 4}
-            textAnchor="end"
-            fontSize="11"
-            fill="var(--mute)"
-            className="font-mono"
-          >
-            {rate(tick)}
-          </text>
-        </g>
-      ))}
-      {ticks(least, most, 6).map((tick) => (
-        <g key={tick}>
-          <path d={`M${place(x(tick))} ${floor}v6`} stroke="var(--line-strong)" />
-          <text
-            x={place(x(tick))}
-            y={floor + 19}
-            textAnchor="middle"
-            fontSize="11"
-            fill="var(--mute)"
-            className="font-mono"
-          >
-            {clearanceText(picometres(tick), units, -1)}
-          </text>
-        </g>
-      ))}
-      <path d={`M${left} ${top}V${floor}H${right}`} fill="none" stroke="var(--line-strong)" />
-      {points.map((point) => (
-        <Point
-          key={point.build}
-          point={point}
-          x={place(x(point.clearance))}
-          y={place(y(point.rate))}
-          from={place(y(point.rate - point.uncertainty))}
-          to={place(y(point.rate + point.uncertainty))}
+        <LikelyLimit
+          frame={{ left, right, top: top - 12, floor, x, id }}
+          from={likelyLimit.from}
+          to={likelyLimit.to}
+          label={`limit probably here, ${inTen(likelyLimit.share)}`}
         />
-      ))}
-      <text x={0} y={12} fontSize="11" fill="var(--mute)">
-        wear, {unit}/h
-      </text>
-      <text x={right} y={height - 4} textAnchor="end" fontSize="11" fill="var(--mute)">
-        clearance as built, {unit}
-      </text>
+      )}
+      <LeftAxis
+        ticks={wearTicks(rates, units, 5)}
+        scale={y}
+        left={left}
+        right={right}
+        top={top - 12}
+        floor={floor}
+      />
+      <Words x={0} y={12}>
+        wear, {wearUnit(units)}
+      </Words>
+      <BottomAxis
+        ticks={clearanceTicks(clearances, units, 7)}
+        scale={x}
+        from={left}
+        to={right}
+        floor={floor}
+        label={`mean clearance as built at 20 °C, ${unit}`}
+      />
+      {rates.from < 0 && (
+        <path
+          d={`M${left} ${place(y(0))}H${right}`}
+          strokeWidth={lineWeight.hair}
+          className="stroke-line-strong"
+        />
+      )}
+      {points.map(({ build, clearance, rate, uncertainty }) => {
+        const [low, high] = [place(y(rate - uncertainty)), place(y(rate + uncertainty))];
+        const middle = place(x(clearance));
+        return (
+          <path
+            key={build}
+            d={`M${middle} ${low}V${high}M${middle - 4} ${high}h8M${middle - 4} ${low}h8`}
+            strokeWidth={lineWeight.mark}
+            className="fill-none stroke-bronze"
+          />
+        );
+      })}
+      <BuildMarks
+        ordered={false}
+        builds={points.map(({ build, grade, clearance, rate }) => ({
+          build,
+          grade,
+          x: x(clearance),
+          y: y(rate),
+        }))}
+      />
     </Drawing>
   );
 }
 
-interface PointProps {
-  point: WearPoint;
-  x: number;
-  y: number;
-  from: number;
-  to: number;
-}
-
-/** One build: its uncertainty as a bar with ends, its number beside, its worst grade where it was graded. */
-function Point({ point, x, y, from, to }: PointProps) {
-  return (
-    <g>
-      <path
-        d={`M${x} ${from}V${to}M${x - 4} ${from}h8M${x - 4} ${to}h8`}
-        fill="none"
-        stroke="var(--line-strong)"
-        strokeWidth="1.3"
-      />
-      {point.grade === undefined ? (
-        <circle cx={x} cy={y} r="3.2" fill="var(--bronze)" />
-      ) : (
-        <g>
-          <circle cx={x} cy={y} r="9" fill="var(--plate)" />
-          <GlyphShape grade={point.grade} x={x} y={y} radius={8} />
-        </g>
-      )}
-      <text x={x + 13} y={y + 4} fontSize="10" fill="var(--mute)">
-        build {point.build}
-      </text>
-    </g>
-  );
+function summaryOf(
+  points: readonly WearPoint[],
+  likelyLimit: WearAgainstClearanceProps["likelyLimit"],
+  units: PageUnits,
+): string {
+  const text = (value: number) => clearanceText(picometres(value), units);
+  const rates = points.map(({ rate }) => rate);
+  return [
+    `${points.length} ${points.length === 1 ? "build" : "builds"}; wear from ${wearText(Math.min(...rates), units)} to ${wearText(Math.max(...rates), units)} ${wearUnit(units)}`,
+    likelyLimit &&
+      `limit probably here, ${inTen(likelyLimit.share)}: ${text(likelyLimit.from)} to ${text(likelyLimit.to)} ${clearanceUnit(units)}`,
+  ]
+    .filter(Boolean)
+    .join("; ")
+    .concat(".");
 }

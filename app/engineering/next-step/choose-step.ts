@@ -43,7 +43,7 @@ export interface Choosing {
 export function chooseStep(choosing: Choosing): Chosen {
   const { current, margins, marked, situation } = choosing;
   const { leastStep, rules } = margins;
-  const largest = marked ? Math.max(leastStep, rules.largestStep / 2) : rules.largestStep;
+  const largest = Math.max(leastStep, marked ? rules.largestStep / 2 : rules.largestStep);
   const closing = stepsBetween(leastStep, largest).map((step) => current - step);
   const staysPut = marginAt(current, choosing.history, margins) === null;
   const { wider } = chancesOfBest(choosing.belief, situation, situation.current);

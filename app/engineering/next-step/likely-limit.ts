@@ -1,7 +1,7 @@
-import { bestClearance } from "./look-ahead";
 import type { Belief } from "./posterior";
 import { tenth } from "./rules";
 import type { Situation } from "./situation";
+import { bestClearance } from "./truths";
 import type { Posterior } from "./types";
 
 const micron = 1e-6;

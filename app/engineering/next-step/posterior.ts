@@ -24,7 +24,10 @@ export interface Belief {
 
 /** Slopes that are thought possible, µm, with how likely each is before any build. */
 const slopes = [1, 1.5, 2.1, 2.8, 3.6, 4.8] as const;
-export const slopePrior = [0.08, 0.13, 0.22, 0.25, 0.2, 0.12];
+const slopePrior = [0.12, 0.17, 0.22, 0.23, 0.17, 0.09] as const;
+
+/** The limit as a share of the usual clearance, before any build. */
+const usualShare = { centre: 0.66, deviation: 0.13, anywhere: 0.16 } as const;
 
 /** Base wear rates are thought to lie below this, 1 standard deviation, µm/h. */
 const usualBaseRate = 0.3;
@@ -76,12 +79,10 @@ function limitGrid(usual: number): number[] {
  * it; but now and then it could lie anywhere (common practice, no source).
  */
 function logPrior(share: number): number {
-  const z = (share - priorOpts.centre) / priorOpts.sd;
-  return Math.log(
-    ((1 - priorOpts.anywhere) * Math.exp(-0.5 * z * z)) / (2.5066 * priorOpts.sd) + priorOpts.anywhere,
-  );
+  const z = (share - usualShare.centre) / usualShare.deviation;
+  const bell = Math.exp(-0.5 * z * z) / (Math.sqrt(2 * Math.PI) * usualShare.deviation);
+  return Math.log((1 - usualShare.anywhere) * bell + usualShare.anywhere);
 }
-export const priorOpts = { centre: 0.66, sd: 0.15, anywhere: 0.04 };
 
 function normalised(
   limits: number[],

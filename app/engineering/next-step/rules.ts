@@ -30,7 +30,8 @@ function usualByRuleOfThumb(nominal: number): number {
 }
 
 /**
- * What going wrong costs, in rebuilds: the figures that a shop would put on it, as the simulated shop has them.
- * Every tenth away from the best clearance costs power or life for as long as the fit stays there.
+ * What going wrong costs, in rebuilds, as a shop would put it. Every tenth away from the best clearance costs power or
+ * life for as long as the fit stays there. A failed engine costs a shop some 50; it is weighed six times that, because
+ * the belief about how steep the limit is may be wrong just where failure is decided, and people stand near.
  */
-export const costs = { rebuild: 1, distress: 10, failure: 50, perTenth: 5 } as const;
+export const costs = { rebuild: 1, distress: 10, failure: 300, perTenth: 5 } as const;

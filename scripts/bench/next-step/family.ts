@@ -49,7 +49,7 @@ const usual: Family = {
 export const families: readonly Family[] = [
   usual,
   { ...usual, name: "dusty, much debris", debris: 0.35 },
-  { ...usual, name: "very steep limit", slope: [1, 1.6] },
+  { ...usual, name: "very steep limit", slope: [1, 2] },
   // As far above the usual clearance as a first build at the usual can be without failing at once.
   { ...usual, name: "limit above the usual", criticalFromUsual: [-3, 2.5], coatingBenefit: [0, 0] },
   { ...usual, name: "rough gauges", gauge: 1.4 },

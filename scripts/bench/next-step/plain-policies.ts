@@ -35,12 +35,17 @@ export const halving: Policy = (shop, iterations) => {
 };
 
 /** Never steps at all: what timidity costs. */
-export const neverStepping: Policy = (shop, iterations) => ({ target: shop.usual, done: iterations.length > 0 });
+export const neverStepping: Policy = (shop, iterations) => ({
+  target: shop.usual,
+  done: iterations.length > 0,
+});
 
 /** Knows the truth, and closes by no more than a shop's step: the least that any policy could pay. */
 export const knowingTheTruth: Policy = (shop, iterations) => {
   const last = iterations.at(-1);
   if (!last) return { target: shop.usual, done: false };
   const target = Math.max(last.target - fixedStep, shop.best);
-  return Math.abs(last.target - shop.best) < 1e-9 ? { target: shop.best, done: true } : { target, done: false };
+  return Math.abs(last.target - shop.best) < 1e-9
+    ? { target: shop.best, done: true }
+    : { target, done: false };
 };

@@ -81,7 +81,13 @@ export class Shop {
         uncertainty: 2 * Math.SQRT2 * family.gauge * micron,
         grade: this.graded(isDirty ? Math.max(grade, random.whole([2, 4])) : grade),
         damage: isDirty ? random.pick(["embedded-particles", "scoring"]) : damageOf(grade),
-        coatingState: this.fit.coating ? (grade >= 4 ? "worn-through" : grade >= 2 ? "polished" : "intact") : null,
+        coatingState: this.fit.coating
+          ? grade >= 4
+            ? "worn-through"
+            : grade >= 2
+              ? "polished"
+              : "intact"
+          : null,
       };
     });
     const dips = random.chance(0.02 + Math.max(0, (target / micron - this.best / micron) / 200));

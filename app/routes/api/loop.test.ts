@@ -193,6 +193,12 @@ describe.sequential("the loop, by scripts alone", () => {
     ]);
   });
 
+  it("does not take the teardown's readings before the teardown", async () => {
+    const body = { stage: "teardown", readings: sheet([["2.1025 in", "2.1025 in"]]) };
+    const { status, body: problem } = await builder("POST", `/builds/${build}/readings`, { body });
+    expect([status, problem.code]).toEqual([409, "not-torn-down"]);
+  });
+
   it("signs the sheet, after which it is frozen", async () => {
     expect((await state(build, "running", 1)).body).toMatchObject({ status: 409, code: "step-not-allowed" });
     expect((await state(build, "assembled", 7)).body).toMatchObject({ status: 409, code: "lost-update" });

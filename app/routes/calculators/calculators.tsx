@@ -17,6 +17,31 @@ const calculators = [
     what: "From any bore and journal readings, with its uncertainty.",
   },
   { to: href("/calculators/units"), name: "Units", what: "A quantity in every unit of the trade, exact." },
+  {
+    to: href("/calculators/oil"),
+    name: "Oil",
+    what: "Viscosity at any temperature, index and grade from the data sheet.",
+  },
+  {
+    to: href("/calculators/film"),
+    name: "Oil film",
+    what: "Least film, friction, flow and warmth at a steady speed and load.",
+  },
+  {
+    to: href("/calculators/cycle"),
+    name: "Engine cycle",
+    what: "A big end's load, orbit and least film over two turns.",
+  },
+  {
+    to: href("/calculators/map"),
+    name: "Film map",
+    what: "Least film over clearance and viscosity at one duty.",
+  },
+  {
+    to: href("/calculators/gauge-study"),
+    name: "Gauge study",
+    what: "Repeatability and reproducibility by both methods.",
+  },
 ];
 
 export default function Calculators() {

@@ -1,11 +1,11 @@
 import { z } from "zod";
 import { metres } from "~/engineering/quantity/length";
 import { absenceText } from "~/engineering/trade/box-text";
-import { findBuild, listTargets, type Target } from "~/models/build.server";
+import { type Build, findBuild, listTargets, type Target } from "~/models/build.server";
 import { type Fit, listFits } from "~/models/fit.server";
 import { type Gauge, listGauges } from "~/models/gauge.server";
 import { listReadings } from "~/models/reading.server";
-import { type FieldError, invalid, Refusal } from "~/models/refusal";
+import { conflict, type FieldError, invalid, Refusal } from "~/models/refusal";
 import type { Scope } from "~/models/scope";
 import { recordEntry } from "~/models/sheet-entry.server";
 import { fieldErrors, sentenceOf } from "../frame/check";
@@ -96,6 +96,7 @@ export const postReadings = endpoint({
   },
   handle: async ({ scope, params, body }) => {
     const build = await findBuild(scope, params.build);
+    refuseTooEarly(build, body.stage);
     const [fits, targets, gauges] = await Promise.all([
       listFits(scope, build.engine_id),
       listTargets(scope, build.id),
@@ -111,10 +112,18 @@ export const postReadings = endpoint({
   },
 });
 
+function refuseTooEarly({ state, number }: Build, stage: z.infer<typeof stages>): void {
+  if (stage === "assembly" || state === "torn-down" || state === "reviewed") return;
+  throw conflict(
+    "not-torn-down",
+    `Build ${number} is not torn down yet; what it came down with is measured after that.`,
+  );
+}
+
 const refused = (errors: FieldError[]) => ({ status: "refused" as const, errors });
 
 interface Sheet {
-  build: Awaited<ReturnType<typeof findBuild>>;
+  build: Build;
   fits: Fit[];
   targets: Target[];
   gauges: Gauge[];

@@ -15,7 +15,13 @@ const checks = [
   check("types of the routes", "react-router", ["typegen"]),
   check("type check", "tsc", []),
   check("lint and format", "biome", ["check", "."]),
-  check("arrows between the folders", "depcruise", ["app", "database", "scripts", "--config", "dependency-cruiser.config.cjs"]),
+  check("arrows between the folders", "depcruise", [
+    "app",
+    "database",
+    "scripts",
+    "--config",
+    "dependency-cruiser.config.cjs",
+  ]),
 ];
 const tests = runTests();
 
@@ -43,10 +49,14 @@ function runTests() {
     { cwd: root, stdio: "inherit" },
   );
   if (!existsSync(report)) return { passed: 0, failed: 1 };
-  const { numPassedTests, numFailedTests, numFailedTestSuites, testResults } = JSON.parse(readFileSync(report, "utf8"));
+  const { numPassedTests, numFailedTests, numFailedTestSuites, testResults } = JSON.parse(
+    readFileSync(report, "utf8"),
+  );
   rmSync(report);
   // A file that could not be loaded has no tests to count, but it has failed.
-  const unloaded = testResults.filter((file) => file.status === "failed" && file.assertionResults.length === 0).length;
+  const unloaded = testResults.filter(
+    (file) => file.status === "failed" && file.assertionResults.length === 0,
+  ).length;
   const failed = numFailedTests + unloaded;
   const unexplained = status !== 0 && failed === 0 ? Math.max(1, numFailedTestSuites) : 0;
   return { passed: numPassedTests, failed: failed + unexplained };
@@ -60,7 +70,8 @@ function ensureChromium() {
   if (found) return;
   console.log("Installing Chromium for the browser tests.");
   const sudo = process.getuid?.() === 0 ? [] : ["sudo"];
-  const apt = (...args) => execFileSync([...sudo, "apt-get"][0], [...sudo, "apt-get", ...args].slice(1), { stdio: "inherit" });
+  const apt = (...args) =>
+    execFileSync([...sudo, "apt-get"][0], [...sudo, "apt-get", ...args].slice(1), { stdio: "inherit" });
   apt("update", "-qq");
   apt("install", "-y", "-qq", "--no-install-recommends", "chromium");
 }

@@ -1,6 +1,8 @@
 // npm run bench [-- --json] [-- next-step]: measures the core on this machine and prints each goal beside its figure.
+import { bench as clearance } from "./clearance";
 import { bench as cycle } from "./cycle";
 import { bench as film } from "./film";
+import { bench as quantity } from "./quantity";
 
 /** One thing that was timed, in seconds. */
 interface Timed {
@@ -15,7 +17,7 @@ const asJson = process.argv.includes("--json");
 if (subject === "next-step") {
   await import("./next-step/index");
 } else {
-  report([...film(), ...cycle()]);
+  report([...quantity(), ...clearance(), ...film(), ...cycle()]);
 }
 
 function report(timed: Timed[]): void {
@@ -27,6 +29,8 @@ function report(timed: Timed[]): void {
     seconds < 1e-3 ? `${(seconds * 1e6).toFixed(1)} µs` : `${(seconds * 1e3).toFixed(2)} ms`;
   for (const { what, goal, seconds } of timed) {
     const verdict = seconds <= goal ? "met" : "MISSED";
-    console.log(`${verdict.padEnd(7)} ${duration(seconds).padStart(10)}  goal ${duration(goal).padStart(10)}  ${what}`);
+    console.log(
+      `${verdict.padEnd(7)} ${duration(seconds).padStart(10)}  goal ${duration(goal).padStart(10)}  ${what}`,
+    );
   }
 }

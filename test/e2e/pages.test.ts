@@ -12,6 +12,11 @@ beforeAll(async () => {
 
 afterAll(() => server?.stop());
 
+/** A small study: two parts, two people, two trials. */
+const studyLines = ["1 A 1 2.1001", "1 A 2 2.1002", "2 A 1 2.1011", "2 A 2 2.1012"]
+  .concat(["1 B 1 2.1002", "1 B 2 2.1002", "2 B 1 2.1012", "2 B 2 2.1013"])
+  .join("\n");
+
 /** The addresses of every page, those of an engine by the demo's own links. */
 async function addresses(page: Page): Promise<string[]> {
   const hrefs = (selector: string) =>
@@ -45,6 +50,11 @@ async function addresses(page: Page): Promise<string[]> {
     "/calculators",
     "/calculators/units?quantity=2.1000+in",
     "/calculators/clearance?bore-front-vertical=2.1025&journal-front-a=53.34+mm",
+    "/calculators/oil?kv40=100&kv100=11",
+    "/calculators/film?diameter=1.5&length=1.5&clearance=.003&speed=1800&load=500+lbf&viscosity=27.579&boreRoughness=12&journalRoughness=8",
+    "/calculators/cycle?bore=4.125&stroke=3.25&rodLength=6&reciprocatingMass=620&rotatingMass=480&speed=8500&peakPressure=95&diameter=2.1&length=.85&clearance=.0025&viscosity=9",
+    "/calculators/map?diameter=2.1&length=.85&clearanceFrom=.0015&clearanceTo=.003&viscosityFrom=6&viscosityTo=15&speed=7200&load=12000&boreRoughness=12&journalRoughness=4",
+    `/calculators/gauge-study?readings=${encodeURIComponent(studyLines)}`,
     "/shop",
     "/account",
     "/api",

@@ -1,6 +1,7 @@
 import { Form, href } from "react-router";
 import { requireSignedIn } from "~/access/who.server";
 import { Button } from "~/components/ui/button";
+import { ErrorSummary } from "~/components/ui/error-summary";
 import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { Table } from "~/components/ui/table";
@@ -31,6 +32,9 @@ export default function Units({ loaderData }: Route.ComponentProps) {
   const { typed } = loaderData;
   return (
     <Page title="Units" breadcrumbs={[{ to: href("/calculators"), label: "Calculators" }]}>
+      {"error" in loaderData && loaderData.error && (
+        <ErrorSummary errors={[{ path: "quantity", message: loaderData.error }]} />
+      )}
       <Form method="get" className="mb-7 flex max-w-xl items-end gap-4">
         <div className="grow">
           <Field

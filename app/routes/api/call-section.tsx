@@ -42,7 +42,11 @@ function Fields({ caption, fields }: { caption: string; fields: CallDescription[
         {fields.map(({ path, type, needed, what }) => (
           <div key={path} className="border-b border-line py-1 sm:grid sm:grid-cols-2 sm:gap-4">
             <dt className="break-words font-mono text-[13px] font-semibold">{path}</dt>
-            <dd>{[type, needed ? "" : "may be left out", what].filter(Boolean).join("; ")}</dd>
+            <dd>
+              {type}
+              {needed ? "" : ", may be left out"}
+              {what && `. ${what}`}
+            </dd>
           </div>
         ))}
       </dl>

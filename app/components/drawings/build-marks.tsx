@@ -1,5 +1,5 @@
 import { GlyphShape } from "./condition-glyph";
-import { keepApart } from "./keep-apart";
+import { besideEach } from "./keep-apart";
 import { lineWeight } from "./line-weight";
 import { pathThrough, place } from "./scale";
 import { Figure } from "./text";
@@ -14,48 +14,42 @@ interface BuildMark {
 
 const radius = 10;
 
-/** An engine's builds in order on a chart: a line from one to the next, each with its grade's glyph and its number. */
-export function BuildMarks({ builds, ordered = true }: { builds: readonly BuildMark[]; ordered?: boolean }) {
-  const places = keepApart(builds, radius * 3.1);
+/** An engine's builds on a chart: a point where each lies, its number and its grade's glyph beside, none on another. */
+export function BuildMarks({ builds, inOrder = false }: { builds: readonly BuildMark[]; inOrder?: boolean }) {
+  const labels = besideEach(builds, 2.3 * radius, 3.5 * radius);
   return (
     <g>
-      {ordered && builds.length > 1 && (
+      {inOrder && builds.length > 1 && (
         <path
           d={pathThrough(builds)}
           strokeWidth={lineWeight.mark}
-          strokeDasharray="1 3"
+          strokeDasharray="2 3"
           className="fill-none stroke-ink"
         />
       )}
+      {builds.map((build, index) => (
+        <path
+          key={build.build}
+          d={pathThrough([build, labels[index]!])}
+          strokeWidth={lineWeight.hair}
+          className="stroke-line-strong"
+        />
+      ))}
       {builds.map(({ build, grade, x, y }, index) => {
-        const label = places[index]!;
-        const moved = label.x !== x || label.y !== y;
+        const label = labels[index]!;
         return (
           <g key={build}>
-            {moved && (
-              <>
-                <path
-                  d={pathThrough([{ x, y }, label])}
-                  strokeWidth={lineWeight.hair}
-                  className="stroke-line-strong"
-                />
-                <circle cx={place(x)} cy={place(y)} r="2.4" className="fill-bronze" />
-              </>
-            )}
-            {grade === undefined ? (
-              <circle
-                cx={place(label.x)}
-                cy={place(label.y)}
-                r="4"
-                strokeWidth={lineWeight.mark}
-                className="fill-plate stroke-bronze"
-              />
-            ) : (
-              <GlyphShape grade={grade} x={label.x} y={label.y - 2} radius={radius} />
-            )}
-            <Figure x={label.x} y={label.y - radius - 3} anchor="middle" size={10} halo>
+            <circle cx={place(x)} cy={place(y)} r="3.4" className="fill-bronze" />
+            <Figure
+              x={label.x}
+              y={grade === undefined ? label.y + 4 : label.y - radius}
+              anchor="middle"
+              size={grade === undefined ? 12 : 10}
+              halo
+            >
               {build}
             </Figure>
+            {grade !== undefined && <GlyphShape grade={grade} x={label.x} y={label.y} radius={radius} />}
           </g>
         );
       })}

@@ -5,6 +5,7 @@ import { clearanceTicks } from "./clearance-axis";
 import { GlyphShape } from "./condition-glyph";
 import { Drawing, type DrawingTable } from "./drawing";
 import { lineWeight } from "./line-weight";
+import { MarkKey } from "./mark-key";
 import { OilLane } from "./oil-lane";
 import { linearScale, pathThrough, place, spanOf } from "./scale";
 import { Figure, Words } from "./text";
@@ -62,7 +63,7 @@ export function ClearanceByBuild({ title, units, builds }: ClearanceByBuildProps
       table={tableOf(builds, units)}
     >
       <LeftAxis
-        ticks={clearanceTicks(y.span, units, 6)}
+        ticks={clearanceTicks(y.span, units, 8)}
         scale={y.scale}
         left={left}
         right={right}
@@ -72,6 +73,17 @@ export function ClearanceByBuild({ title, units, builds }: ClearanceByBuildProps
       <Words x={0} y={12}>
         clearance at 20 °C, {clearanceUnit(units)}
       </Words>
+      <MarkKey
+        x={right - 460}
+        y={12}
+        marks={[
+          "built",
+          "torn",
+          "mean",
+          "target",
+          ...(builds.some(({ window }) => window) ? (["window"] as const) : []),
+        ]}
+      />
       {rowHeads.map(({ head, y }) => (
         <Words key={head} x={left - 9} y={y} anchor="end" size={11}>
           {head}

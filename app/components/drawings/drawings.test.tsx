@@ -74,7 +74,7 @@ test("the fit strip says its figures in words and in a table", () => {
   expect(name).toContain("Aim .00250 in, window .00220 to .00280");
   expect(name).toContain("2 positions as built from .00240 to .00250");
   expect(name).toContain("7 in 10 that the limit lies from .00160 to .00190");
-  expect(name).toContain("next step: close by .00020, from .00250 to .00230");
+  expect(name).toContain("next step: close by .0002, from .00250 to .00230");
   const rows = within(screen.getByRole("table", { hidden: true })).getAllByRole("row", { hidden: true });
   expect(rows.map((row) => [...row.children].map((cell) => cell.textContent))).toEqual([
     ["position", "as built, in", "torn down, in", "wear, in"],

@@ -16,7 +16,7 @@ interface FilmLinesProps {
 
 /** A contour of the film with its figure. */
 export function FilmContour({ lines, film }: FilmLinesProps) {
-  const label = labelPlace(lines, 0.93);
+  const label = labelPlace(lines, 0.9);
   if (!label) return null;
   return (
     <g>

@@ -109,6 +109,7 @@ export function FilmMap({
         <FilmLimit lines={contourLines(field, limitFilm).map((line) => line.map(onMap))} film={limitFilm} />
       )}
       <BuildMarks
+        inOrder
         builds={builds.map(({ build, grade, clearance, viscosity }) => ({
           build,
           grade,

@@ -202,7 +202,7 @@ export function StripStep({
       <StepArrow from={{ x: start, y }} to={{ x: end, y }} />
       <path d={`M${place(end)} ${floor}v-11`} strokeWidth={lineWeight.strong} className="stroke-layout" />
       {label && (
-        <Words x={start + behind} y={y + 4} anchor={behind > 0 ? "start" : "end"} tone="layout" halo>
+        <Words x={start + behind} y={y + 4} anchor={behind > 0 ? "start" : "end"} tone="layout">
           {label}
         </Words>
       )}

@@ -1,6 +1,7 @@
 import { clearanceText, clearanceUnit, type PageUnits } from "~/engineering/quantity/figures";
 import { picometres } from "~/engineering/quantity/length";
 import type { DrawingTable } from "./drawing";
+import { stepWords } from "./step-words";
 
 /** A position of a fit; clearances in m. */
 export interface StripPosition {
@@ -22,13 +23,6 @@ export interface StripFigures {
 
 /** "7 in 10" for 0.7. */
 export const inTen = (share: number): string => `${Math.round(share * 10)} in 10`;
-
-/** The step in words: "close by .00010", "hold". */
-export function stepWords({ from, to }: { from: number; to: number }, units: PageUnits): string {
-  const by = picometres(Math.abs(to - from));
-  if (by === 0) return "hold";
-  return `${to < from ? "close" : "open"} by ${clearanceText(by, units)}`;
-}
 
 /** What a fit strip shows, as one sentence. */
 export function stripSummary({ units, window, positions, likelyLimit, step }: StripFigures): string {

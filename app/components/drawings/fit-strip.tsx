@@ -13,9 +13,10 @@ import {
   StripStep,
   TargetWindow,
 } from "./fit-strip-marks";
-import { inTen, type StripFigures, stepWords, stripSummary, stripTable } from "./fit-strip-words";
+import { inTen, type StripFigures, stripSummary, stripTable } from "./fit-strip-words";
+import { MarkKey } from "./mark-key";
 import { linearScale, type Span } from "./scale";
-import { Words } from "./text";
+import { stepWords } from "./step-words";
 
 interface FitStripProps extends StripFigures {
   title: string;
@@ -46,7 +47,7 @@ export function FitStrip({ title, limits, size = "full", ...figures }: FitStripP
   const span = spanOfStrip(figures, limits);
 
   const top = lettered && likelyLimit ? 24 : 6;
-  const floor = top + spare + Math.max(3, shown.length) * row + (step ? stepHeight : spare) + spare;
+  const floor = top + spare + Math.max(3, shown.length) * row + (step ? stepHeight : 14) + spare;
   const left = side;
   const right = width - side;
   const scale = linearScale(span.from, span.to, left, right);
@@ -109,7 +110,7 @@ export function FitStrip({ title, limits, size = "full", ...figures }: FitStripP
         floor={floor}
         label={lettered ? `clearance at 20 °C, ${clearanceUnit(units)}` : undefined}
       />
-      {lettered && <Key x={left} y={floor + 36} radius={radius} />}
+      {lettered && <MarkKey x={left} y={floor + 36} marks={["built", "torn", "aim"]} />}
     </Drawing>
   );
 }
@@ -140,25 +141,4 @@ function spanOfStrip(
   const to = Math.max(...values);
   const air = (to - from) * 0.07;
   return { from: from - air, to: to + air };
-}
-
-/** What the marks mean. */
-function Key({ x, y, radius }: { x: number; y: number; radius: number }) {
-  const middle = y - 4;
-  return (
-    <g>
-      <circle cx={x + 3} cy={middle} r={radius} className="fill-bronze" />
-      <Words x={x + 11} y={y}>
-        as built
-      </Words>
-      <circle cx={x + 76} cy={middle} r={radius} strokeWidth="1.5" className="fill-plate stroke-bronze" />
-      <Words x={x + 84} y={y}>
-        torn down
-      </Words>
-      <path d={`M${x + 158} ${y}l-5.5 -9h11z`} className="fill-bronze" />
-      <Words x={x + 168} y={y}>
-        aim
-      </Words>
-    </g>
-  );
 }

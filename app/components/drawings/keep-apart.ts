@@ -3,33 +3,38 @@ interface Place {
   y: number;
 }
 
-const directions = 12;
-const rings = 6;
+const directions = 16;
+const rings = 8;
 
 /**
- * Places near the given ones that lie at least `distance` from each other, in order: the first stays, later ones give
- * way to the nearest free place round their own. With more of them than there is room for, the last ones overlap.
+ * A place for a label beside each of these places: `away` from all of them and `apart` from the other labels, to the
+ * right where that is free. With more of them than there is room for, the last ones overlap.
  */
-export function keepApart(places: readonly Place[], distance: number): Place[] {
+export function besideEach(places: readonly Place[], away: number, apart: number): Place[] {
   const taken: Place[] = [];
   for (const own of places) {
-    taken.push(candidates(own, distance).find((place) => isFree(place, taken, distance)) ?? own);
+    const around = candidates(own, away);
+    const free = around.find(
+      (candidate) =>
+        places.every((place) => distance(place, candidate) >= away * 0.99) &&
+        taken.every((place) => distance(place, candidate) >= apart),
+    );
+    taken.push(free ?? around[0]!);
   }
   return taken;
 }
 
-function candidates(own: Place, distance: number): Place[] {
-  const around = Array.from({ length: rings * directions }, (_, index) => {
-    const radius = distance * (0.55 + 0.45 * (1 + Math.floor(index / directions)));
-    // Upwards first: what stands over its true place is read as belonging to it.
-    const angle = -Math.PI / 2 + ((index % directions) * 2 * Math.PI) / directions;
+const distance = (one: Place, other: Place): number => Math.hypot(one.x - other.x, one.y - other.y);
+
+function candidates(own: Place, away: number): Place[] {
+  return Array.from({ length: rings * directions }, (_, index) => {
+    const radius = away * (1 + 0.5 * Math.floor(index / directions));
+    const turn = index % directions;
+    // From the right, by turns upwards and downwards, to the left.
+    const steps = turn % 2 === 0 ? -turn / 2 : (turn + 1) / 2;
+    const angle = (steps * 2 * Math.PI) / directions;
     return { x: own.x + radius * Math.cos(angle), y: own.y + radius * Math.sin(angle) };
   });
-  return [own, ...around];
-}
-
-function isFree(place: Place, taken: readonly Place[], distance: number): boolean {
-  return taken.every(({ x, y }) => Math.hypot(place.x - x, place.y - y) >= distance - 1e-9);
 }
 
 /** Heights for labels beside each other's lines: in the same order, at least `gap` apart, inside the span where they fit. */

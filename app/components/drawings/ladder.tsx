@@ -1,9 +1,10 @@
 import { Link } from "react-router";
-import { clearanceText, type PageUnits } from "~/engineering/quantity/figures";
+import type { PageUnits } from "~/engineering/quantity/figures";
 import { picometres } from "~/engineering/quantity/length";
 import { inWords } from "~/engineering/trade/condition";
 import { ConditionGlyph } from "./condition-glyph";
 import { oilTone } from "./oil-tone";
+import { stepSize } from "./step-words";
 
 interface Rung {
   id: string;
@@ -43,7 +44,7 @@ export function Ladder({ title, rungs, current, units = "inch" }: LadderProps) {
         {rungs.map((rung) => (
           <li
             key={rung.id}
-            className="relative grid grid-cols-[4.25rem_5.5rem_minmax(0,1fr)] gap-x-2.5 hover:bg-plate-deep"
+            className="relative grid grid-cols-[4rem_6.25rem_minmax(0,1fr)] gap-x-2.5 hover:bg-plate-deep"
           >
             <Link
               to={rung.to}
@@ -56,7 +57,9 @@ export function Ladder({ title, rungs, current, units = "inch" }: LadderProps) {
             <span className="flex h-12 items-center gap-2 text-dense leading-tight text-mute">
               {rung.grade !== undefined && <ConditionGlyph grade={rung.grade} />}
               <span>
-                {rung.oil && <span className="block font-mono text-[0.6875rem]">{rung.oil}</span>}
+                {rung.oil && (
+                  <span className="block whitespace-nowrap font-mono text-[0.6875rem]">{rung.oil}</span>
+                )}
                 {wordsOf(rung)}
               </span>
             </span>
@@ -92,21 +95,24 @@ function RungOnRails({ rung, units }: { rung: Rung; units: PageUnits }) {
 }
 
 function StepBelow({ step, units }: { step: number; units: PageUnits }) {
-  const by = picometres(Math.abs(step));
   const [word, colour, arrow] =
-    by === 0
+    picometres(step) === 0
       ? ["held", "", "M2 4h8"]
       : step < 0
         ? ["closed", "text-layout", "M11 4H2M5 1L2 4l3 3"]
         : ["opened", "text-watch", "M1 4h9M7 1l3 3-3 3"];
   return (
-    <span className={`flex items-center justify-center gap-1 pt-3 pb-2 font-sans text-[0.75rem] ${colour}`}>
+    <span
+      className={`flex items-center justify-center gap-1 whitespace-nowrap pt-3 pb-2 font-sans text-[0.75rem] ${colour}`}
+    >
       <svg aria-hidden="true" viewBox="0 0 12 8" className="w-3 fill-none stroke-current stroke-[1.5]">
         <path d={arrow} />
       </svg>
       <span>
         {word}
-        {by !== 0 && <span className="font-mono"> {clearanceText(by, units, -1)}</span>}
+        {picometres(step) !== 0 && (
+          <span className="font-mono text-[0.6875rem]"> {stepSize(step, units)}</span>
+        )}
       </span>
     </span>
   );

@@ -3,17 +3,9 @@ import { plainTicks } from "./clearance-axis";
 import { Drawing } from "./drawing";
 import { filmText } from "./film-levels";
 import { lineWeight } from "./line-weight";
-import {
-  degreesOf,
-  everyThirty,
-  markedAngles,
-  nearest,
-  onPaper,
-  PolarRings,
-  thinnedOut,
-} from "./polar-frame";
+import { AngleMarks, degreesOf, everyThirty, onPaper, PolarRings, thinnedOut } from "./polar-frame";
 import { linearScale, pathThrough, place } from "./scale";
-import { Figure, Words } from "./text";
+import { Words } from "./text";
 
 interface OrbitAt {
   /** Rad. */
@@ -81,8 +73,8 @@ interface PartProps {
 
 function OrbitInClearance({ orbit, least, direction }: PartProps & { direction: string }) {
   const toPaper = onPaper(centre, reach);
-  const place2 = ({ ex, ey }: OrbitAt) => toPaper({ x: ex, y: ey });
-  const thinnest = place2(least);
+  const inClearance = ({ ex, ey }: OrbitAt) => toPaper({ x: ex, y: ey });
+  const thinnest = inClearance(least);
   return (
     <g>
       <PolarRings
@@ -100,24 +92,12 @@ function OrbitInClearance({ orbit, least, direction }: PartProps & { direction: 
         ↑ {direction}
       </Words>
       <path
-        d={`${pathThrough(thinnedOut(orbit, 360).map(place2))}z`}
+        d={`${pathThrough(thinnedOut(orbit, 360).map(inClearance))}z`}
         strokeWidth={lineWeight.mark}
         strokeLinejoin="round"
         className="fill-none stroke-bronze"
       />
-      {markedAngles.map((degrees) => {
-        const point = nearest(orbit, degrees);
-        if (!point || Math.abs(degreesOf(point.crankAngle) - degrees) > 15) return null;
-        const { x, y } = place2(point);
-        return (
-          <g key={degrees}>
-            <circle cx={place(x)} cy={place(y)} r="2.6" className="fill-bronze" />
-            <Figure x={x + 5} y={y - 5} size={10} tone="ink" halo>
-              {degrees}°
-            </Figure>
-          </g>
-        );
-      })}
+      <AngleMarks points={orbit} toPaper={inClearance} />
       <circle
         cx={place(thinnest.x)}
         cy={place(thinnest.y)}
@@ -191,9 +171,15 @@ function FilmOverCycle({
         strokeWidth={lineWeight.strong}
         className="fill-none stroke-layout"
       />
+      <path
+        d={`M${place(thinnest.x)} ${place(thinnest.y - 6)}V${top + 4}`}
+        strokeWidth={lineWeight.hair}
+        strokeDasharray="2 3"
+        className="stroke-layout"
+      />
       <Words
-        x={thinnest.x + (isRight ? -11 : 11)}
-        y={thinnest.y - 12}
+        x={thinnest.x + (isRight ? -5 : 5)}
+        y={top + 8}
         anchor={isRight ? "end" : "start"}
         tone="layout"
         halo

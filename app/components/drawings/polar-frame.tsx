@@ -1,3 +1,4 @@
+import { besideEach } from "./keep-apart";
 import { lineWeight } from "./line-weight";
 import { place } from "./scale";
 import { Figure } from "./text";
@@ -38,7 +39,13 @@ export function PolarRings({ centre, rings }: PolarRingsProps) {
         className="stroke-line-strong"
       />
       {rings.map(({ radius, text }) => (
-        <Figure key={radius} x={centre.x + radius} y={centre.y - 5} anchor="end" size={10} halo>
+        <Figure
+          key={radius}
+          x={centre.x + radius * Math.SQRT1_2 + 3}
+          y={centre.y + radius * Math.SQRT1_2 + 9}
+          size={10}
+          halo
+        >
           {text}
         </Figure>
       ))}
@@ -46,11 +53,42 @@ export function PolarRings({ centre, rings }: PolarRingsProps) {
   );
 }
 
-/** The crank angles (degrees) of a cycle whose places are marked along a path. */
-export const markedAngles = [0, 90, 180, 270, 360, 450, 540, 630] as const;
+/** Every quarter turn of a cycle, °. */
+const quarterTurns = [0, 90, 180, 270, 360, 450, 540, 630] as const;
+
+interface AngleMarksProps<Point> {
+  points: readonly Point[];
+  toPaper: (point: Point) => Place;
+}
+
+/** The crank angle beside a path at every quarter turn. */
+export function AngleMarks<Point extends { crankAngle: number }>({
+  points,
+  toPaper,
+}: AngleMarksProps<Point>) {
+  const marks = quarterTurns.flatMap((degrees) => {
+    const point = nearest(points, degrees);
+    return point && Math.abs(degreesOf(point.crankAngle) - degrees) <= 15
+      ? [{ degrees, ...toPaper(point) }]
+      : [];
+  });
+  const labels = besideEach(marks, 19, 24);
+  return (
+    <g>
+      {marks.map(({ degrees, x, y }, index) => (
+        <g key={degrees}>
+          <circle cx={place(x)} cy={place(y)} r="2.8" className="fill-bronze" />
+          <Figure x={labels[index]!.x} y={labels[index]!.y + 4} anchor="middle" size={10} tone="ink" halo>
+            {degrees}°
+          </Figure>
+        </g>
+      ))}
+    </g>
+  );
+}
 
 /** The point of a path that lies nearest to a crank angle (degrees); undefined on an empty path. */
-export function nearest<Point extends { crankAngle: number }>(
+function nearest<Point extends { crankAngle: number }>(
   points: readonly Point[],
   degrees: number,
 ): Point | undefined {

@@ -1,16 +1,8 @@
 import { Drawing } from "./drawing";
 import { lineWeight } from "./line-weight";
-import {
-  degreesOf,
-  everyThirty,
-  markedAngles,
-  nearest,
-  onPaper,
-  PolarRings,
-  thinnedOut,
-} from "./polar-frame";
+import { AngleMarks, degreesOf, everyThirty, onPaper, PolarRings, thinnedOut } from "./polar-frame";
 import { niceTicks, pathThrough, place } from "./scale";
-import { Figure, Words } from "./text";
+import { Words } from "./text";
 
 interface LoadAt {
   /** Rad. */
@@ -74,19 +66,7 @@ export function PolarLoad({ title, loads, direction }: PolarLoadProps) {
         strokeLinejoin="round"
         className="fill-none stroke-bronze"
       />
-      {markedAngles.map((degrees) => {
-        const load = nearest(loads, degrees);
-        if (!load || Math.abs(degreesOf(load.crankAngle) - degrees) > 15) return null;
-        const { x, y } = toPaper(load);
-        return (
-          <g key={degrees}>
-            <circle cx={place(x)} cy={place(y)} r="2.6" className="fill-bronze" />
-            <Figure x={x + 5} y={y - 5} size={10} tone="ink" halo>
-              {degrees}°
-            </Figure>
-          </g>
-        );
-      })}
+      <AngleMarks points={loads} toPaper={toPaper} />
       <circle
         cx={place(tip.x)}
         cy={place(tip.y)}

@@ -50,7 +50,7 @@ function DrawnText({
       textAnchor={anchor}
       fontSize={size}
       className={`${face} ${fills[tone]} ${halo ? "stroke-plate [paint-order:stroke]" : ""}`.trim()}
-      strokeWidth={halo ? 4 : undefined}
+      strokeWidth={halo ? 7 : undefined}
       strokeLinejoin={halo ? "round" : undefined}
     >
       {children}

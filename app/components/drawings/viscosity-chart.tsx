@@ -5,7 +5,7 @@ import { stackApart } from "./keep-apart";
 import { lineWeight } from "./line-weight";
 import { oilTone } from "./oil-tone";
 import { linearScale, pathThrough, place } from "./scale";
-import { cutTo, Words } from "./text";
+import { cutTo, Figure, Words } from "./text";
 
 interface ChartOil {
   name: string;
@@ -129,7 +129,12 @@ function OilLine({ oil: { name, kv40, kv100, ranAtC, at }, x, y, labelY }: OilLi
         />
       ))}
       {ranAtC !== undefined && (
-        <path d={`M${place(x(ranAtC))} ${place(y(at(ranAtC)) - 6)}l-5.5 -9h11z`} className="fill-layout" />
+        <g>
+          <path d={`M${place(x(ranAtC))} ${place(y(at(ranAtC)) - 4)}l-5.5 -9h11z`} className="fill-layout" />
+          <Figure x={x(ranAtC) + 8} y={y(at(ranAtC)) - 8} size={11} tone="layout" halo>
+            {ranAtC.toFixed(0)} °C
+          </Figure>
+        </g>
       )}
       <path
         d={pathThrough([

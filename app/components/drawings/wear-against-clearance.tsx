@@ -122,7 +122,6 @@ export function WearAgainstClearance({ title, units, points, likelyLimit }: Wear
         );
       })}
       <BuildMarks
-        ordered={false}
         builds={points.map(({ build, grade, clearance, rate }) => ({
           build,
           grade,

@@ -29,7 +29,7 @@ export function Page({ title, subtitle, breadcrumbs = [], actions, aside, childr
         {actions && <div className="flex flex-wrap gap-3">{actions}</div>}
       </div>
       {aside ? (
-        <div className="grid gap-9 lg:grid-cols-[250px_minmax(0,1fr)]">
+        <div className="grid gap-9 lg:grid-cols-[272px_minmax(0,1fr)]">
           <aside className="order-2 lg:order-1">{aside}</aside>
           <div className="order-1 min-w-0 lg:order-2">{children}</div>
         </div>

@@ -1,4 +1,3 @@
-import { z } from "zod";
 import { permissions, roleNames } from "~/access/permissions";
 import { endpoints } from "./endpoints";
 import { callsPerMinute } from "./frame/allowance.server";
@@ -23,8 +22,15 @@ export interface CallDescription {
   answer: FieldLine[];
 }
 
-/** The calls of the API for people, from the objects that answer them. */
-export function describeCalls() {
+/** The calls of the API for people, from the objects that answer them; worked out once. */
+export function describeCalls(): ReturnType<typeof workOut> {
+  described ??= workOut();
+  return described;
+}
+
+let described: ReturnType<typeof workOut> | undefined;
+
+function workOut() {
   const of = (calculators: boolean) =>
     endpoints.filter(({ who }) => (who === "token") === calculators).map(describe);
   return {
@@ -45,7 +51,7 @@ function describe(endpoint: Endpoint): CallDescription {
     title: endpoint.title,
     about: endpoint.about,
     who: whoText(endpoint.who),
-    query: fieldsOf(z.object(endpoint.query ?? {}), "input"),
+    query: endpoint.who === "everyone" ? [] : fieldsOf(endpoint.query, "input"),
     body: endpoint.body ? fieldsOf(endpoint.body, "input") : [],
     example: endpoint.example === undefined ? undefined : JSON.stringify(endpoint.example, null, 2),
     status: endpoint.status ?? 200,

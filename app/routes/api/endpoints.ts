@@ -64,8 +64,13 @@ const getOpenApi = endpoint({
   who: "everyone",
   title: "This API as OpenAPI 3.1",
   answer: z.record(z.string(), z.unknown()),
-  handle: async () => openApi(endpoints),
+  handle: async () => {
+    description ??= openApi(endpoints);
+    return description;
+  },
 });
+
+let description: ReturnType<typeof openApi> | undefined;
 
 /** Every call of the API, in the order that the page `/api` shows them. */
 export const endpoints: readonly Endpoint[] = [...calculators, ...shop, getOpenApi];

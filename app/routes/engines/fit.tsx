@@ -2,7 +2,7 @@ import { data, Form, href, Link } from "react-router";
 import { z } from "zod";
 import { may } from "~/access/permissions";
 import { requirePerson } from "~/access/who.server";
-import { Button } from "~/components/ui/button";
+import { Button, ButtonLink } from "~/components/ui/button";
 import { Choice } from "~/components/ui/choice";
 import { ErrorSummary } from "~/components/ui/error-summary";
 import { Field } from "~/components/ui/field";
@@ -25,6 +25,7 @@ import { listDecisions } from "~/models/sign-off.server";
 import { orFormErrors, orPage, refuseForm } from "~/routes/answer.server";
 import { fieldErrors, fieldsOf, optionalQuantity, quantity, text } from "~/routes/form-fields";
 import type { Route } from "./+types/fit";
+import { calculatorsFor } from "./calculators-for-fit";
 import { FitCharts } from "./fit-charts";
 import { PastDecisions, pastDecisions } from "./past-decisions";
 
@@ -72,6 +73,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     builds: history.iterations,
     evidence: latest?.answer.evidence.builds ?? [],
     likelyLimit: latest && likelyLimit(latest.answer),
+    calculators: calculatorsFor(fit, history.iterations.at(-1)),
     decisions: pastDecisions(decisions, history.iterations, person.units),
   };
 }
@@ -148,6 +150,13 @@ export default function FitPage({ loaderData: fit, actionData }: Route.Component
           likelyLimit={fit.likelyLimit}
         />
       )}
+      <nav aria-label="Calculators filled from this fit" className="mb-6 flex flex-wrap gap-3">
+        {fit.calculators.map(({ to, label }) => (
+          <ButtonLink key={to} to={to}>
+            {label}
+          </ButtonLink>
+        ))}
+      </nav>
       <PastDecisions decisions={fit.decisions} />
       {fit.mayWrite ? (
         <>

@@ -1,5 +1,4 @@
 import { randomBytes } from "node:crypto";
-import { z } from "zod";
 import { countCall } from "./allowance.server";
 import { type Caller, findCaller, requirePermission, requireWriting } from "./bearer.server";
 import { check } from "./check";
@@ -8,7 +7,7 @@ import { findEndpoint } from "./find-endpoint";
 import { answerHeaders } from "./headers";
 import { type JsonAnswer, onlyOnce } from "./only-once.server";
 import { asProblem, problemDetails, problemResponse } from "./problem.server";
-import { sayIn, unitsQuery } from "./quantity-out";
+import { sayIn } from "./quantity-out";
 import { discardBody, readJson } from "./read-json";
 
 /**
@@ -30,7 +29,7 @@ export async function answerCall(
     const caller = await findCaller(request);
     countCall(caller.token);
     requireRights(endpoint, caller);
-    const query = check(queryOf(endpoint), Object.fromEntries(searchParams));
+    const query = check(endpoint.query, Object.fromEntries(searchParams));
     const sent = endpoint.body ? await readJson(request) : { value: undefined, text: "" };
     const body = endpoint.body && check(endpoint.body, sent.value);
     const say = sayIn(query.units);
@@ -50,8 +49,6 @@ function requireRights(endpoint: Endpoint, caller: Caller): void {
   if (writes(endpoint)) requireWriting(caller);
   if (endpoint.who !== "token" && endpoint.who !== "everyone") requirePermission(caller.scope, endpoint.who);
 }
-
-const queryOf = (endpoint: Endpoint) => z.strictObject({ ...endpoint.query, units: unitsQuery });
 
 // The schema that describes an answer also makes it: a number that is none, or a field nobody described, cannot go out.
 async function jsonOf(endpoint: Endpoint, given: unknown): Promise<JsonAnswer> {

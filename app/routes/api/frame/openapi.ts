@@ -2,7 +2,6 @@ import { z } from "zod";
 import { type Endpoint, writes } from "./endpoint";
 import { apiRoot } from "./find-endpoint";
 import { type ProblemStatus, problemTitles } from "./problem.server";
-import { unitsQuery } from "./quantity-out";
 
 type Json = Record<string, unknown>;
 
@@ -72,7 +71,7 @@ function parameters(endpoint: Endpoint, components: Json): Json[] {
     schema: { type: "string" },
   }));
   if (endpoint.who === "everyone") return inPath;
-  const inQuery = Object.entries({ ...endpoint.query, units: unitsQuery }).map(([name, schema]) => ({
+  const inQuery = Object.entries(endpoint.query.shape).map(([name, schema]) => ({
     name,
     in: "query",
     schema: jsonSchema(schema as z.ZodType, "input", components),

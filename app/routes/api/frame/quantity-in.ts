@@ -29,11 +29,11 @@ export const amount = (kind: QuantityKind, limits: Limits = {}) =>
   z
     .unknown()
     .transform((given, context): number => {
-      const answered = answeredQuantity.safeParse(given);
-      if (typeof given !== "string" && !answered.success) return refuse(context, notText(given, kind));
+      const si = typeof given === "string" ? undefined : answeredQuantity.safeParse(given).data?.si;
+      if (typeof given !== "string" && si === undefined) return refuse(context, notText(given, kind));
       return orRefuse(context, () => {
-        const si = answered.success ? coreOf(answered.data.si, kind) : read(given as string, kind).si;
-        return within({ kind, si }, limits).si;
+        const core = si === undefined ? read(given as string, kind).si : coreOf(si, kind);
+        return within({ kind, si: core }, limits).si;
       });
     })
     .meta({ type: ["string", "object"], ...described(kind, limits) });
@@ -47,6 +47,8 @@ export const anyQuantity = z
   })
   .meta({ type: "string", description: "With any unit.", examples: ["2.1000 in"] });
 
+const lengthAmount = amount("small-length");
+
 /**
  * A figure of a study that is about no unit in particular: a length with its unit, or a plain number.
  * Gives the number, and whether it is a length in m.
@@ -55,7 +57,7 @@ export const figure = z
   .unknown()
   .transform((given, context): { value: number; isLength: boolean } => {
     if (typeof given === "number" && Number.isFinite(given)) return { value: given, isLength: false };
-    const length = amount("small-length").safeParse(given);
+    const length = lengthAmount.safeParse(given);
     if (length.success) return { value: length.data, isLength: true };
     return refuse(context, { code: "wrong-type", message: length.error.issues[0]!.message });
   })

@@ -62,9 +62,9 @@ test("the page's units run through the section", () => {
 });
 
 test("how much larger the clearance is drawn is said", () => {
-  // 28 px for the widest gap of .0027 in, 88 px for the journal's 2.4497 in: 28/.0027 ÷ 88/2.4497 = 288.7.
+  // 46 px for the widest gap of .0027 in, 74 px for the journal's 2.4497 in: 46/.0027 ÷ 74/2.4497 = 564.
   render(<BoreView {...given} />);
-  expect(screen.getByRole("img").textContent).toContain("clearance drawn 290 times larger");
+  expect(screen.getByRole("img").textContent).toContain("clearance drawn 560 times larger");
 });
 
 test.each([
@@ -99,4 +99,13 @@ test("wear since the build is shaded, and its figures are in the table", () => {
   );
   expect(shaded(container)).toBe(1);
   expect(screen.getByRole("rowheader", { name: "bore as built, vertical 90°", hidden: true })).toBeTruthy();
+});
+
+test("the clearance of each axis stands at its far end, and a worn journal is shaded too", () => {
+  const { container } = render(
+    <BoreView {...given} journalAsBuilt={[{ axis: "a", value: 2.4498 * inch }]} />,
+  );
+  const words = screen.getByRole("img").textContent;
+  for (const clearance of [".00240", ".00270", ".00260"]) expect(words).toContain(clearance);
+  expect(container.querySelectorAll("[data-wear]").length).toBe(1);
 });

@@ -1,6 +1,6 @@
 import { besideEach } from "./keep-apart";
 import { lineWeight } from "./line-weight";
-import { place } from "./scale";
+import { pathThrough, place } from "./scale";
 import { Figure } from "./text";
 
 interface Place {
@@ -77,6 +77,11 @@ export function AngleMarks<Point extends { crankAngle: number }>({
     <g>
       {marks.map(({ degrees, x, y }, index) => (
         <g key={degrees}>
+          <path
+            d={pathThrough([{ x, y }, labels[index]!])}
+            strokeWidth={lineWeight.hair}
+            className="stroke-line-strong"
+          />
           <circle cx={place(x)} cy={place(y)} r="2.8" className="fill-bronze" />
           <Figure x={labels[index]!.x} y={labels[index]!.y + 4} anchor="middle" size={10} tone="ink" halo>
             {degrees}°

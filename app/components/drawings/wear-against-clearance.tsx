@@ -8,7 +8,7 @@ import { Drawing } from "./drawing";
 import { LikelyLimit } from "./fit-strip-marks";
 import { inTen } from "./fit-strip-words";
 import { lineWeight } from "./line-weight";
-import { linearScale, place, spanOf } from "./scale";
+import { linearScale, place, type Span, spanOf } from "./scale";
 import { Words } from "./text";
 import { wearText, wearTicks, wearUnit } from "./wear-axis";
 
@@ -44,11 +44,7 @@ export function WearAgainstClearance({ title, units, points, likelyLimit }: Wear
     5e-6,
     0.12,
   );
-  const rates = spanOf(
-    [0, ...points.flatMap(({ rate, uncertainty }) => [rate - uncertainty, rate + uncertainty])],
-    1e-8,
-    0.1,
-  );
+  const rates = ratesSpan(points);
   const x = linearScale(clearances.from, clearances.to, left, right);
   const y = linearScale(rates.from, rates.to, floor, top);
   const unit = clearanceUnit(units);
@@ -131,6 +127,13 @@ export function WearAgainstClearance({ title, units, points, likelyLimit }: Wear
       />
     </Drawing>
   );
+}
+
+/** From nothing, or from below it where the truth may lie there, to a little over the most. */
+function ratesSpan(points: readonly WearPoint[]): Span {
+  const least = Math.min(0, ...points.map(({ rate, uncertainty }) => rate - uncertainty));
+  const most = Math.max(1e-8, ...points.map(({ rate, uncertainty }) => rate + uncertainty));
+  return { from: least * 1.1, to: most * 1.1 };
 }
 
 function summaryOf(

@@ -27,7 +27,7 @@ interface BoreViewProps {
 }
 
 const width = 480;
-const height = 370;
+const height = 384;
 const journalRadius = 74;
 /** The widest gap as it is drawn, px. */
 const gap = 46;
@@ -106,9 +106,14 @@ export function BoreView(props: BoreViewProps) {
       {journal.map(({ axis, value }) => (
         <JournalAxis key={axis} frame={frame} axis={axis} diameter={diameterText(picometres(value), units)} />
       ))}
-      <Words x={frame.x} y={height - 6} anchor="middle">
+      <Words x={frame.x} y={height - 21} anchor="middle">
         {`${both ? "clearance" : "shape"} drawn ${Number(larger.toPrecision(2))} times larger; between the axes not measured`}
       </Words>
+      {both && (
+        <Words x={frame.x} y={height - 5} anchor="middle">
+          {`at the far end of each axis its clearance, ${clearanceUnit(units)}`}
+        </Words>
+      )}
     </Drawing>
   );
 }

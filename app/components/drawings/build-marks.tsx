@@ -12,11 +12,19 @@ interface BuildMark {
   y: number;
 }
 
+interface BuildMarksProps {
+  builds: readonly BuildMark[];
+  /** Joined by a line from each build to the next. */
+  inOrder?: boolean;
+  /** Places that glyphs must not cover. */
+  clearOf?: readonly { x: number; y: number }[];
+}
+
 const radius = 10;
 
 /** An engine's builds on a chart: a point where each lies, its number and its grade's glyph beside, none on another. */
-export function BuildMarks({ builds, inOrder = false }: { builds: readonly BuildMark[]; inOrder?: boolean }) {
-  const labels = besideEach(builds, 2.3 * radius, 3.5 * radius);
+export function BuildMarks({ builds, inOrder = false, clearOf = [] }: BuildMarksProps) {
+  const labels = besideEach(builds, 2.3 * radius, 3.5 * radius, clearOf);
   return (
     <g>
       {inOrder && builds.length > 1 && (

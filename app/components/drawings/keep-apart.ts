@@ -7,16 +7,22 @@ const directions = 16;
 const rings = 8;
 
 /**
- * A place for a label beside each of these places: `away` from all of them and `apart` from the other labels, to the
- * right where that is free. With more of them than there is room for, the last ones overlap.
+ * A place for a label beside each of these places: `away` from all of them and from `others`, and `apart` from the
+ * other labels, to the right where that is free. With more of them than there is room for, the last ones overlap.
  */
-export function besideEach(places: readonly Place[], away: number, apart: number): Place[] {
+export function besideEach(
+  places: readonly Place[],
+  away: number,
+  apart: number,
+  others: readonly Place[] = [],
+): Place[] {
+  const occupied = [...places, ...others];
   const taken: Place[] = [];
   for (const own of places) {
     const around = candidates(own, away);
     const free = around.find(
       (candidate) =>
-        places.every((place) => distance(place, candidate) >= away * 0.99) &&
+        occupied.every((place) => distance(place, candidate) >= away * 0.99) &&
         taken.every((place) => distance(place, candidate) >= apart),
     );
     taken.push(free ?? around[0]!);

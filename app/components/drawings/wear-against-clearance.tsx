@@ -118,6 +118,9 @@ export function WearAgainstClearance({ title, units, points, likelyLimit }: Wear
         );
       })}
       <BuildMarks
+        clearOf={points.flatMap(({ clearance, rate, uncertainty }) =>
+          [-1, -0.5, 0.5, 1].map((share) => ({ x: x(clearance), y: y(rate + share * uncertainty) })),
+        )}
         builds={points.map(({ build, grade, clearance, rate }) => ({
           build,
           grade,

@@ -22,14 +22,15 @@ interface DrawingProps {
 export function Drawing({ title, summary, width, height, table, leastWidth, children }: DrawingProps) {
   const id = useId();
   return (
-    <figure className="overflow-x-auto">
+    // What moves sideways must have something in it that a key reaches: its figures.
+    <figure className={table && "overflow-x-auto"}>
       <svg
         role="img"
         aria-labelledby={`${id}-title`}
         aria-describedby={`${id}-summary`}
         viewBox={`0 0 ${width} ${height}`}
         className="block h-auto w-full"
-        style={{ maxWidth: width, minWidth: leastWidth ?? Math.round(width * 0.75) }}
+        style={{ maxWidth: width, minWidth: table && (leastWidth ?? Math.round(width * 0.75)) }}
       >
         <title id={`${id}-title`}>{title}</title>
         <desc id={`${id}-summary`}>{summary}</desc>

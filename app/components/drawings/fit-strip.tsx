@@ -60,7 +60,6 @@ export function FitStrip({ title, limits, size = "full", ...figures }: FitStripP
       summary={stripSummary({ ...figures, positions: shown })}
       width={width}
       height={lettered ? floor + 42 : floor + 8}
-      leastWidth={lettered ? undefined : 200}
       table={lettered && shown.length > 0 ? stripTable({ ...figures, positions: shown }) : undefined}
     >
       {limits && <HardLimits frame={frame} limits={limits} />}

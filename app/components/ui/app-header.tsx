@@ -16,7 +16,7 @@ export function AppHeader({ links, units, ...person }: AppHeaderProps) {
     <header className="bg-paper print:hidden">
       <a
         href="#matter"
-        className="absolute left-2 top-0 z-20 -translate-y-[120%] rounded-b bg-layout px-4 py-3 text-on-layout focus:translate-y-0"
+        className="sr-only rounded-b bg-layout text-on-layout focus:not-sr-only focus:absolute focus:left-2 focus:top-0 focus:z-20 focus:px-4 focus:py-3"
       >
         Skip to the page
       </a>

@@ -31,6 +31,11 @@ export default [
       index("routes/calculators/calculators.tsx"),
       route("units", "routes/calculators/units.tsx"),
       route("clearance", "routes/calculators/clearance.tsx"),
+      route("oil", "routes/calculators/oil.tsx"),
+      route("film", "routes/calculators/film.tsx"),
+      route("cycle", "routes/calculators/cycle.tsx"),
+      route("map", "routes/calculators/map.tsx"),
+      route("gauge-study", "routes/calculators/gauge-study.tsx"),
     ]),
 
     route("shop", "routes/shop/shop.tsx"),

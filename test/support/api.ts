@@ -1,3 +1,4 @@
+import { expect } from "vitest";
 import { endpoints } from "~/routes/api/endpoints";
 import { answerCall } from "~/routes/api/frame/answer.server";
 
@@ -34,3 +35,24 @@ export function apiCaller(token?: string) {
 }
 
 export type ApiCaller = ReturnType<typeof apiCaller>;
+
+/** The calculators as a script with this token uses them. */
+export function calculators(token: string) {
+  const call = apiCaller(token);
+  return {
+    /** The answer to a body that must be taken. */
+    calculate: async (path: string, body: unknown) => {
+      const { status, body: answer } = await call("POST", `/calc/${path}`, { body });
+      expect([status, answer.errors]).toEqual([200, undefined]);
+      return answer;
+    },
+    /** The errors of a body that must be refused. */
+    refused: async (path: string, body: unknown) => {
+      const { status, body: answer } = await call("POST", `/calc/${path}`, { body });
+      expect(status).toBe(422);
+      return answer.errors as { path: string; code: string; message: string }[];
+    },
+  };
+}
+
+export type Calculators = ReturnType<typeof calculators>;

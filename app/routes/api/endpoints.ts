@@ -17,8 +17,9 @@ import { getEngine, getEngines, postEngine } from "./shop/engines";
 import { postFinding } from "./shop/findings";
 import { getGauge, getGauges, postGauge } from "./shop/gauges";
 import { getHealth } from "./shop/health";
+import { postReadings } from "./shop/new-readings";
 import { getOil, getOils, postOil } from "./shop/oils";
-import { getReadings, postReadings } from "./shop/readings";
+import { getReadings } from "./shop/readings";
 import { postRun } from "./shop/runs";
 
 const calculators = [

@@ -6,10 +6,11 @@ import { clearanceUncertainty, unknownGauge } from "~/engineering/uncertainty/cl
 import { endpoint } from "../frame/endpoint";
 import { amount } from "../frame/quantity-in";
 import { quantityOut } from "../frame/quantity-out";
+import { box } from "../shop/reading-box";
 
 const reading = z.strictObject({
-  plane: z.enum(["front", "middle", "rear"]),
-  axis: z.enum(["vertical", "plus45", "minus45", "horizontal", "a", "b"]),
+  plane: box.plane,
+  axis: box.axis,
   value: amount("length", { over: 0, most: 2 }),
   temperature: amount("temperature", { least: -40, most: 200 }).optional(),
 });

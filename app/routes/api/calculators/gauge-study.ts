@@ -2,8 +2,8 @@ import { z } from "zod";
 import { gaugeStudy, type StudyResult } from "~/engineering/uncertainty/gauge-study";
 import { invalid } from "~/models/refusal";
 import { endpoint } from "../frame/endpoint";
-import { figure } from "../frame/quantity-in";
 import { quantityOut, type Say } from "../frame/quantity-out";
+import { studyFigure } from "./study-figure";
 
 const named = z.union([z.string().min(1).max(60), z.int()], {
   error: "This must be text or a whole number.",
@@ -40,10 +40,10 @@ export const postGaugeStudy = endpoint({
     "Every person measures every part as often; 2 to 20 parts, up to 10 people, 2 to 10 trials. Values are lengths with their unit, or all of them plain numbers.",
   body: z.strictObject({
     readings: z
-      .array(z.strictObject({ part: named, person: named, trial: named, value: figure }))
+      .array(z.strictObject({ part: named, person: named, trial: named, value: studyFigure }))
       .min(1)
       .max(2000),
-    tolerance: figure.optional(),
+    tolerance: studyFigure.optional(),
   }),
   answer: z.object({
     averageAndRange: result,

@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { amount, anyQuantity, figure, quantity } from "./quantity-in";
+import { amount, anyQuantity, quantity } from "./quantity-in";
 
 const codesOf = (
   schema: { safeParse: (value: unknown) => { error?: { issues: unknown[] } | undefined } },
@@ -47,11 +47,5 @@ describe("a quantity on its way in", () => {
   it("may be of any kind where its unit says which", () => {
     expect(anyQuantity.parse("60 psi").kind).toBe("pressure");
     expect(codesOf(anyQuantity, "60")).toEqual(["no-unit"]);
-  });
-
-  it("may be a plain number in a study, which knows no unit", () => {
-    expect(figure.parse(0.29)).toEqual({ value: 0.29, isLength: false });
-    expect(figure.parse("1 um")).toEqual({ value: 1e-6, isLength: true });
-    expect(codesOf(figure, "0.29")).toEqual(["wrong-type"]);
   });
 });

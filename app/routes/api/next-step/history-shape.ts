@@ -4,12 +4,7 @@ import { coatingStates, damageTerms, runEvents } from "~/engineering/trade/condi
 import { fitKindNames } from "~/engineering/trade/fit-kinds";
 import { amount } from "../frame/quantity-in";
 import { quantityOut } from "../frame/quantity-out";
-
-interface Limits {
-  over?: number;
-  least?: number;
-  most?: number;
-}
+import type { Limits } from "../frame/quantity-words";
 
 /**
  * What the next step is worked out from. One shape for both ways, so that the history that the API gives is what the

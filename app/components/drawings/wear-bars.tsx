@@ -76,12 +76,10 @@ function WearBar({ bar, y, x, units }: WearBarProps) {
         {position}
       </Figure>
       {isBound && (
-        <path
-          d={`M${left} ${y}H${place(x(to))}m0 -6v12`}
-          strokeWidth={lineWeight.mark}
-          strokeDasharray="3 3"
-          className="fill-none stroke-bronze"
-        />
+        <g strokeWidth={lineWeight.mark} className="stroke-bronze">
+          <path d={`M${left} ${y}H${place(x(to))}`} strokeDasharray="3 3" />
+          <path d={`M${place(x(to))} ${y - 5}v10`} />
+        </g>
       )}
       {!isBound && rate !== null && rate > 0 && (
         <path

@@ -1,6 +1,11 @@
 import { defineConfig } from "vitest/config";
 
-const plain = { environment: "node" as const, setupFiles: ["test/support/no-console-errors.ts"] };
+const plain = {
+  environment: "node" as const,
+  setupFiles: ["test/support/no-console-errors.ts"],
+  // Solving a whole table of films takes seconds on a busy machine; nothing here is timed.
+  testTimeout: 60_000,
+};
 
 export default defineConfig({
   resolve: { tsconfigPaths: true },

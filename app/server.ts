@@ -7,6 +7,7 @@ import { database } from "#database/connection";
 import { seedDemo } from "#database/demo/seed";
 import { migrate } from "#database/migrate";
 import { addressContext } from "~/access/who.server";
+import { refuseEarly } from "~/refuse-early";
 
 /** Brings the database up to date, and in the demo fills a new one with the invented shop. */
 export async function prepareDatabase(): Promise<void> {
@@ -34,9 +35,9 @@ export async function serve(clientDirectory: string): Promise<{ server: Server; 
       return context;
     },
   });
-  const server = createServer((request, response) =>
-    files(request, response, () => pages(request, response)),
-  );
+  const server = createServer((request, response) => {
+    if (!refuseEarly(request, response)) files(request, response, () => pages(request, response));
+  });
   // A body that never ends, or a client that never reads, must not hold a place for ever.
   server.requestTimeout = 120_000;
   server.headersTimeout = 20_000;

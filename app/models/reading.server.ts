@@ -101,6 +101,12 @@ async function writeReading(
   build: Build,
   reading: NewReading,
 ): Promise<string> {
+  if (reading.box.stage === "teardown" && build.state !== "torn-down") {
+    throw conflict(
+      "not-torn-down",
+      `Build ${build.number} is not torn down; its teardown sheet takes no readings.`,
+    );
+  }
   await refuseForeignPosition(transaction, build, reading.box);
   const standing = await findStanding(transaction, build.id, reading.box);
   const supersedes = reading.supersedes === undefined ? (standing?.id ?? null) : reading.supersedes;

@@ -1,3 +1,4 @@
+import { connect } from "node:net";
 import { afterAll, beforeAll, expect, test } from "vitest";
 import { demoPassword } from "#database/demo/people";
 import { type RunningServer, startServer } from "#test/support/server";
@@ -194,4 +195,29 @@ test("cookies and headers are those of a guarded page", async () => {
   expect(policy).not.toMatch(/script-src[^;]*unsafe-inline/);
   expect(page.headers.get("x-content-type-options")).toBe("nosniff");
   expect((await get("/no/such/page", cookies.get("owner@example.test"))).status).toBe(404);
+});
+
+test("a method nobody uses, a body without end and a form too large are answered, and the product goes on", async () => {
+  const { hostname, port } = new URL(server.address);
+  const answerTo = (head: string) =>
+    new Promise<string>((resolve, reject) => {
+      const socket = connect(Number(port), hostname === "localhost" ? "127.0.0.1" : hostname);
+      let text = "";
+      socket.on("data", (chunk) => {
+        text += chunk;
+      });
+      socket.on("close", () => resolve(text));
+      socket.on("error", reject);
+      socket.write(`${head}\r\nHost: ${hostname}:${port}\r\nConnection: close\r\n\r\n`);
+    });
+  expect(await answerTo("TRACE / HTTP/1.1")).toMatch(/^HTTP\/1.1 501/);
+  expect(await answerTo("POST /sign-in HTTP/1.1\r\nTransfer-Encoding: chunked")).toMatch(/^HTTP\/1.1 411/);
+  expect(await answerTo("POST /sign-in HTTP/1.1\r\nContent-Length: 99999999")).toMatch(/^HTTP\/1.1 413/);
+  expect((await get("/sign-in")).status).toBe(200);
+});
+
+test("the API answers a stranger in its own words, not as a page", async () => {
+  const response = await fetch(`${server.address}/api/v1/calc/convert`, { method: "POST", body: "{}" });
+  expect(response.status).toBe(401);
+  expect(response.headers.get("content-type")).toContain("application/problem+json");
 });

@@ -1,5 +1,5 @@
 import type { WeighedBuild } from "./likeness";
-import type { Verdict } from "./said";
+import type { Verdict } from "./verdict";
 
 /**
  * The second guard: damage that clearance does not explain has to be understood before the clearance is judged. The

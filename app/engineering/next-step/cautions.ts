@@ -3,9 +3,9 @@ import { isDistressed } from "./judged-build";
 import type { WeighedBuild } from "./likeness";
 import { oilWasChanged } from "./one-at-a-time";
 import type { CompleteRules } from "./rules";
-import type { Said } from "./said";
 import { oddWears } from "./signs";
 import type { Action } from "./types";
+import type { Said } from "./words";
 import { inSentence } from "./words";
 
 /** What a person should know beside the proposal. */

@@ -3,9 +3,9 @@ import { lookAhead, type Outlook, type Prospect } from "./look-ahead";
 import { type Margins, marginAt } from "./margin";
 import type { Belief } from "./posterior";
 import { tenth } from "./rules";
-import type { Said } from "./said";
 import type { Situation } from "./situation";
 import type { Action, History } from "./types";
+import type { Said } from "./words";
 
 const micron = 1e-6;
 
@@ -99,13 +99,17 @@ export function cheapestTarget(targets: readonly number[], choosing: Choosing) {
   return { target: toPicometre(cheapest(prospects)!.target * micron), considered: prospects };
 }
 
-/** From the least to the largest in half tenths, the largest itself always; empty where the least is larger. */
+/**
+ * From the least to the largest in half tenths, the largest itself always; empty where the least is larger. Where rough
+ * gauges make the least step more than a tenth, that step itself too, rounded up to a tenth of a tenth.
+ */
 export function stepsBetween(least: number, largest: number): number[] {
-  const steps: number[] = [];
-  for (let step = Math.ceil(least / stepGrid - 1e-6) * stepGrid; step < largest - 1e-9; step += stepGrid) {
-    steps.push(step);
-  }
-  return least <= largest + 1e-12 ? [...steps, largest] : steps;
+  if (least > largest + 1e-12) return [];
+  const inGrid = (grid: number) => Math.ceil(least / grid - 1e-6) * grid;
+  const steps = new Set([largest]);
+  if (least > tenth && inGrid(tenth / 10) < largest - 1e-9) steps.add(inGrid(tenth / 10));
+  for (let step = inGrid(stepGrid); step < largest - 1e-9; step += stepGrid) steps.add(step);
+  return [...steps].sort((a, b) => a - b);
 }
 
 /** Where the last build lies outside the hard limits, the limit itself is a target too. */

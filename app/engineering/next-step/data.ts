@@ -2,8 +2,8 @@ import { median } from "simple-statistics";
 import type { WeighedBuild } from "./likeness";
 import { expandedUncertainty } from "./readings";
 import type { CompleteRules } from "./rules";
-import type { Verdict } from "./said";
 import type { OilOfRun } from "./types";
+import type { Verdict } from "./verdict";
 
 /**
  * The first guard: whether the data of the last build allow a judgement. Null where they do.

@@ -3,7 +3,7 @@ import { wearRise } from "./baseline";
 import { isDistressed } from "./judged-build";
 import type { WeighedBuild } from "./likeness";
 import type { CompleteRules } from "./rules";
-import type { Said } from "./said";
+import type { Said } from "./words";
 
 /** Oil hotter than before by this much at like duty is not chance, °C (common practice, no source). */
 const hotterBy = 10;

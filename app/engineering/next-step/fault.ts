@@ -1,8 +1,8 @@
 import { max, mean, median, min } from "simple-statistics";
 import type { Readings } from "./readings";
 import type { CompleteRules } from "./rules";
-import type { Said } from "./said";
 import type { Iteration } from "./types";
+import type { Said } from "./words";
 
 interface Expectation {
   /** How many positions the fit has. */

@@ -4,8 +4,8 @@ import { causeElsewhere } from "./damage";
 import { faultOf } from "./fault";
 import { type Readings, sortReadings, type UsablePosition } from "./readings";
 import type { CompleteRules } from "./rules";
-import type { Said } from "./said";
 import type { FitOfHistory, History, Iteration } from "./types";
+import type { Said } from "./words";
 
 /** Damage on one position that clearance does not explain, and where to look. */
 export interface DamageElsewhere {

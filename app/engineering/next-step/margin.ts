@@ -1,7 +1,7 @@
 import type { Bracket } from "./bracket";
 import type { CompleteRules } from "./rules";
-import type { Said } from "./said";
 import type { FilmPoint, History } from "./types";
+import type { Said } from "./words";
 
 /** The least change of target that is worth a build, and what limits each target; m. */
 export interface Margins {

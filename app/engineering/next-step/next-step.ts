@@ -16,10 +16,10 @@ import { openUp } from "./open-up";
 import { cannotSee, wouldChange } from "./outlook-words";
 import { believe } from "./posterior";
 import { type CompleteRules, completeRules, tenth } from "./rules";
-import type { Said } from "./said";
 import { buildScatter, signsOf } from "./signs";
 import type { Situation } from "./situation";
 import type { Action, History, NextStep, Rules, Units } from "./types";
+import type { Said } from "./words";
 import { inSentence } from "./words";
 
 const micron = 1e-6;
@@ -60,7 +60,8 @@ export function nextStep(history: History, rules: Rules = {}, units: Units = "in
   const say = (said: Said) => inSentence(said, units);
   return {
     ...answer,
-    confidence: confidenceOf(decision, choosing),
+    // Sums over the grid come out a rounding error over one.
+    confidence: Math.min(1, Math.max(0, confidenceOf(decision, choosing))),
     reasons: [...decision.reasons, ...supporting(decision, builds, posterior)].map(say),
     cautions: cautionsOf(builds, decision, complete).map(say),
     wouldChange: wouldChange(answer, complete, units),
@@ -131,9 +132,15 @@ function choosingOf(history: History, builds: readonly WeighedBuild[], rules: Co
       rules,
     },
     current: last?.iteration.target ?? rules.usual,
-    marked: last !== undefined && last.marked >= Math.max(2, last.positions.length / 4),
+    marked: last !== undefined && isMarked(last, builds),
     mayStay: last !== undefined && last.weight > 0 && isClean(last),
   };
+}
+
+/** Marked in several positions; after a single build already in one, since nothing yet says that it was misgraded. */
+function isMarked({ marked, positions }: WeighedBuild, builds: readonly WeighedBuild[]): boolean {
+  const counted = builds.filter(({ weight }) => weight > 0).length;
+  return marked >= (counted < 2 ? 1 : Math.max(2, positions.length / 4));
 }
 
 /** A new coating runs at the usual clearance first, as many clean builds as the rules ask. */

@@ -1,7 +1,7 @@
 import { isSameTarget } from "./data";
 import { isClean } from "./judged-build";
 import { isSameOil, type WeighedBuild } from "./likeness";
-import type { Said } from "./said";
+import type { Said } from "./words";
 
 /** Which oil gave way to which in the last build; null where it did not change. */
 export function oilWasChanged(builds: readonly WeighedBuild[]): Said["values"] | null {

@@ -3,7 +3,7 @@ import type { Detriment } from "./detriment";
 import { isClean } from "./judged-build";
 import type { WeighedBuild } from "./likeness";
 import type { Prospect } from "./look-ahead";
-import type { Said } from "./said";
+import type { Said } from "./words";
 
 export interface Opened {
   action: "open" | "find-cause";

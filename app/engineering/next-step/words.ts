@@ -1,6 +1,5 @@
 import { inWords } from "../trade/condition";
 import { chanceText, clearanceText, rateText, stepText, temperatureText } from "./lengths";
-import type { Said } from "./said";
 import type { Statement, Units } from "./types";
 
 /** The values of a thing to say, each in the words of its kind. */
@@ -145,6 +144,12 @@ const sentences = {
 } as const satisfies Record<string, (values: Values) => string>;
 
 export type Code = keyof typeof sentences;
+
+/** A thing to say, before it is put into words: its code and its numbers, SI. */
+export interface Said {
+  code: Code;
+  values: Record<string, number | string>;
+}
 
 /** Puts a thing into words; lengths in the units asked for. */
 export function inSentence({ code, values }: Said, units: Units): Statement {

@@ -12,10 +12,12 @@ interface ReadOutProps {
   clearance: string | undefined;
   /** Whether everything is saved; said as it changes. */
   status: string;
+  /** Takes the latest box back; for who has no Control key at hand. */
+  onUndo?: (() => void) | undefined;
 }
 
 /** The box in hand, large enough to read at arm's length. */
-export function ReadOut({ box, state, title, expected, clearance, status }: ReadOutProps) {
+export function ReadOut({ box, state, title, expected, clearance, status, onUndo }: ReadOutProps) {
   const figures = [
     {
       label: box && title ? `${title}, ${box.station.feature} ${stationName(box.station)}` : "No box chosen",
@@ -36,9 +38,16 @@ export function ReadOut({ box, state, title, expected, clearance, status }: Read
           </div>
         ))}
       </dl>
-      <p role="status" className="border-t border-line px-4 py-2 text-[13px] text-mute">
-        {status}
-      </p>
+      <div className="flex items-center justify-between border-t border-line px-4 text-[13px] text-mute">
+        <p role="status" className="py-2">
+          {status}
+        </p>
+        {onUndo && (
+          <button type="button" className="min-h-11 cursor-pointer underline" onClick={onUndo}>
+            Take the last one back
+          </button>
+        )}
+      </div>
     </div>
   );
 }

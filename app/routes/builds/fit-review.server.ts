@@ -1,3 +1,4 @@
+import { buildColumns } from "~/engineering/next-step/build-columns";
 import { likelyLimit } from "~/engineering/next-step/likely-band";
 import type { Iteration, NextStep } from "~/engineering/next-step/types";
 import { clearanceText, dayText, type PageUnits } from "~/engineering/quantity/figures";
@@ -49,6 +50,7 @@ export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDec
       likelyLimit: likelyLimit(answer),
       step: answer.step === 0 ? undefined : { from: answer.target - answer.step, to: answer.target },
     },
+    builds: buildColumns(history.iterations, metres(fit.tolerance_pm)),
     wear: build ? wearOfClearances(beforeAfter(build), build.hours) : [],
     decisions: pastDecisions(
       decisions.filter((decision) => decision.number < proposal.buildNumber),

@@ -1,4 +1,5 @@
 import { Form, href, Link } from "react-router";
+import { ClearanceByBuild } from "~/components/drawings/clearance-by-build";
 import { FitStrip } from "~/components/drawings/fit-strip";
 import { WearBars } from "~/components/drawings/wear-bars";
 import { Button } from "~/components/ui/button";
@@ -93,13 +94,14 @@ export function FitReview({ fit, engineId, maySign, mayAsk, refused }: FitReview
       </p>
       <details className="mt-2">
         <summary className="flex min-h-11 cursor-pointer items-center">
-          What would change it, the wear, and the steps before
+          What would change it, the builds so far, and the wear
         </summary>
         <ul className="mb-4 list-disc pl-5">
           {fit.wouldChange.map((sentence) => (
             <li key={sentence}>{sentence}</li>
           ))}
         </ul>
+        <ClearanceByBuild title={`${fit.name}, clearance by build`} units={fit.units} builds={fit.builds} />
         <PastDecisions decisions={fit.decisions} />
         {fit.wear.length > 0 && (
           <WearBars title={`${fit.name}, wear per hour`} units={fit.units} bars={fit.wear} />

@@ -129,6 +129,7 @@ export function SheetPanel(props: SheetPanelProps) {
           expected={active && expectedValue(judge, active)}
           clearance={active && figures(rowOf(sheet, active))?.vertical}
           status={status}
+          onUndo={isScripted && !frozen ? () => store.undo() : undefined}
         />
         <div className="overflow-x-auto">
           <SheetGrid

@@ -1,13 +1,13 @@
 import { ClearanceByBuild } from "~/components/drawings/clearance-by-build";
 import { WearAgainstClearance } from "~/components/drawings/wear-against-clearance";
-import type { BuildEvidence, Iteration } from "~/engineering/next-step/types";
-import { worstGrade } from "~/engineering/next-step/worst-grade";
+import type { BuildColumns } from "~/engineering/next-step/build-columns";
+import type { BuildEvidence } from "~/engineering/next-step/types";
 import type { PageUnits } from "~/engineering/quantity/figures";
 
 interface FitChartsProps {
   title: string;
   units: PageUnits;
-  builds: Iteration[];
+  builds: BuildColumns;
   /** What the latest proposal made of each build, and where it thinks the limit lies. */
   evidence: BuildEvidence[];
   likelyLimit: { from: number; to: number; share: number } | undefined;
@@ -17,22 +17,7 @@ interface FitChartsProps {
 export function FitCharts({ title, units, builds, evidence, likelyLimit }: FitChartsProps) {
   return (
     <div className="mb-6 grid gap-6">
-      <ClearanceByBuild
-        title={`${title}, clearance by build`}
-        units={units}
-        builds={builds.map((build) => ({
-          build: build.build,
-          target: build.target,
-          hours: build.hours ?? undefined,
-          oil: build.oil?.name,
-          grade: worstGrade(build),
-          positions: build.positions.map((position) => ({
-            number: position.position,
-            assembled: position.assembled?.clearance,
-            tornDown: position.tornDown?.clearance,
-          })),
-        }))}
-      />
+      <ClearanceByBuild title={`${title}, clearance by build`} units={units} builds={builds} />
       <WearAgainstClearance
         title={`${title}, wear against clearance`}
         units={units}

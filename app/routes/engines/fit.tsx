@@ -8,6 +8,7 @@ import { ErrorSummary } from "~/components/ui/error-summary";
 import { Field } from "~/components/ui/field";
 import { Page } from "~/components/ui/page";
 import { Select } from "~/components/ui/select";
+import { buildColumns } from "~/engineering/next-step/build-columns";
 import { likelyLimit } from "~/engineering/next-step/likely-band";
 import {
   clearanceUnit,
@@ -15,6 +16,7 @@ import {
   diameterUnitName,
   type PageUnits,
 } from "~/engineering/quantity/figures";
+import { metres } from "~/engineering/quantity/length";
 import { materials } from "~/engineering/temperature/materials";
 import { fitKind } from "~/engineering/trade/fit-kinds";
 import { findEngine } from "~/models/engine.server";
@@ -70,7 +72,7 @@ export async function loader({ request, context, params }: Route.LoaderArgs) {
     },
     materials: materials.map(({ key, name }) => ({ value: key, label: name })),
     limits: history.fit.hardLimits,
-    builds: history.iterations,
+    builds: buildColumns(history.iterations, metres(fit.tolerance_pm)),
     evidence: latest?.answer.evidence.builds ?? [],
     likelyLimit: latest && likelyLimit(latest.answer),
     calculators: calculatorsFor(fit, history.iterations.at(-1)),

@@ -4,7 +4,7 @@ import { parseQuantity } from "~/engineering/quantity/parse";
 import { fromCore, type QuantityKind, type UnitName } from "~/engineering/quantity/units";
 
 // NIST SP 811 (2008), appendix B: factors exact by definition (inch, pound, standard gravity) and their products to
-// 15 figures. Read in a transcription of that appendix; bar and lbf·ft follow from the definitions.
+// 15 figures. Read in a copy of that appendix; bar and lbf·ft follow from the definitions.
 test.each<[string, QuantityKind, UnitName, number]>([
   ["1 in", "length", "mm", 25.4],
   ["1 uin", "finish", "um", 0.0254],

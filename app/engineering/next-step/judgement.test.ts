@@ -2,6 +2,7 @@ import fc from "fast-check";
 import { expect, test } from "vitest";
 import { nextStep } from "./next-step";
 import type { History, Iteration, PositionOfBuild, Rules } from "./types";
+import { inUnits } from "./words";
 
 const thou = 25.4e-6;
 const tenth = thou / 10;
@@ -62,6 +63,16 @@ test("after a clean build at the usual clearance a big end closes by at most the
   expect(answer.target).toBeCloseTo(usual + answer.step, 12);
   expect(answer.reasons.length).toBeGreaterThan(0);
   expect(answer.cannotSee.length).toBeGreaterThan(0);
+});
+
+test("a stored reason says the same in other units", () => {
+  const [reason] = nextStep(history(build(1, usual)), rules).reasons;
+  expect(reason?.text).toContain(" in");
+  expect(inUnits(reason!, "metric")).toContain("µm");
+  expect(inUnits(reason!, "inch")).toBe(reason?.text);
+  expect(inUnits({ code: "of-another-version", text: "As it was.", values: {} }, "metric")).toBe(
+    "As it was.",
+  );
 });
 
 test("a new coating holds at the usual clearance until its baseline is built", () => {

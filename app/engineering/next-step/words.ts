@@ -165,3 +165,12 @@ export function inSentence({ code, values }: Said, units: Units): Statement {
   });
   return { code, text, values };
 }
+
+/** A stored statement's sentence in other units; as it was stored where its code is no longer one of ours. */
+export function inUnits(statement: Statement, units: Units): string {
+  return isCode(statement.code)
+    ? inSentence({ ...statement, code: statement.code }, units).text
+    : statement.text;
+}
+
+const isCode = (code: string): code is Code => Object.hasOwn(sentences, code);

@@ -1,6 +1,7 @@
 import { buildColumns } from "~/engineering/next-step/build-columns";
 import { likelyLimit } from "~/engineering/next-step/likely-band";
 import type { Iteration, NextStep } from "~/engineering/next-step/types";
+import { inUnits } from "~/engineering/next-step/words";
 import { clearanceText, dayText, type PageUnits } from "~/engineering/quantity/figures";
 import { metres, picometres } from "~/engineering/quantity/length";
 import { fitKind } from "~/engineering/trade/fit-kinds";
@@ -23,8 +24,8 @@ export function fitReview(fit: Fit, proposal: StoredProposal, decisions: PastDec
     day: dayText(proposal.proposedAt),
     stale: proposal.stale,
     headline: headline(answer, units),
-    reasons: answer.reasons.map((reason) => reason.text),
-    cautions: answer.cautions.map((caution) => caution.text),
+    reasons: answer.reasons.map((reason) => inUnits(reason, units)),
+    cautions: answer.cautions.map((caution) => inUnits(caution, units)),
     wouldChange: answer.wouldChange,
     cannotSee: answer.cannotSee,
     action: answer.action,

@@ -27,7 +27,10 @@ const causes: Record<string, string> = {
 };
 
 /** What to look at for a damage that clearance does not explain; null where clearance may explain it. */
-export function causeElsewhere({ damage, coatingState }: PositionOfBuild): string | null {
+export function causeElsewhere({
+  damage,
+  coatingState,
+}: Pick<PositionOfBuild, "damage" | "coatingState">): string | null {
   if (damage !== null && Object.hasOwn(causes, damage)) return causes[damage]!;
   return coatingState === "flaking" ? "the coating's bond: finish and cleaning before coating, batch" : null;
 }

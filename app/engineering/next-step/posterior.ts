@@ -24,7 +24,7 @@ export interface Belief {
 
 /** Slopes that are thought possible, µm, with how likely each is before any build. */
 const slopes = [1, 1.5, 2.1, 2.8, 3.6, 4.8] as const;
-const slopePrior = [0.12, 0.17, 0.22, 0.23, 0.17, 0.09] as const;
+const slopePrior = [0.16, 0.18, 0.21, 0.21, 0.15, 0.09] as const;
 
 /** The limit as a share of the usual clearance, before any build. */
 const usualShare = { centre: 0.66, deviation: 0.13, anywhere: 0.16 } as const;

@@ -9,7 +9,8 @@ export const usualScatter = tenth / 2;
 const usualUncertainty = 0.8 * tenth;
 
 /** A position whose readings can be used, lengths in m. */
-export interface UsablePosition extends PositionOfBuild {
+export interface UsablePosition
+  extends Pick<PositionOfBuild, "position" | "grade" | "damage" | "coatingState"> {
   /** As assembled; null where the reading was left out and only the target stands in. */
   clearance: number | null;
   /** Growth of the clearance; null where a reading is missing or was left out. */
@@ -64,7 +65,8 @@ export function sortReadings(iteration: Iteration, { largestStep }: CompleteRule
     if (wear !== null && wear < -3 * Math.SQRT2 * standardUncertainty) {
       wear = leave("teardown", "negative-wear", wear, expected);
     }
-    return { ...position, clearance, wear, standardUncertainty };
+    const { position: number, grade, damage, coatingState } = position;
+    return { position: number, grade, damage, coatingState, clearance, wear, standardUncertainty };
   });
   return { positions, leftOut };
 }

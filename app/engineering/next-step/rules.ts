@@ -31,7 +31,7 @@ function usualByRuleOfThumb(nominal: number): number {
 
 /**
  * What going wrong costs, in rebuilds, as a shop would put it. Every tenth away from the best clearance costs power or
- * life for as long as the fit stays there. A failed engine costs a shop some 50; it is weighed six times that,
+ * life for as long as the fit stays there. A failed engine costs a shop some 50; it is weighed four times that,
  * because the belief about how steep the limit is may be wrong just where failure is decided, and people stand near.
  */
-export const costs = { rebuild: 1, distress: 10, failure: 300, perTenth: 5 } as const;
+export const costs = { rebuild: 1, distress: 10, failure: 200, perTenth: 5 } as const;

@@ -1,7 +1,6 @@
+// npx tsx scripts/bench/next-step/index.ts [--json] [--seeds tuning|untouched] [--shops 500]: plays the policies.
 import { parseArgs } from "node:util";
 import { benchNextStep, type PolicyRow, type SeedSet } from "./compare";
-
-export { benchNextStep } from "./compare";
 
 /** The goal: at most half the cost of the better plain policy, and grade 4 in under one shop in a hundred. */
 function verdict({ policy, costShare, grade4, grade4Chosen }: PolicyRow): string {
@@ -41,15 +40,14 @@ function print(rows: readonly PolicyRow[]): void {
   }
 }
 
-if (import.meta.url === `file://${process.argv[1]}`) {
-  const { values } = parseArgs({
-    options: {
-      json: { type: "boolean", default: false },
-      seeds: { type: "string", default: "untouched" },
-      shops: { type: "string", default: "500" },
-    },
-  });
-  const rows = benchNextStep(values.seeds as SeedSet, Number(values.shops));
-  if (values.json) console.log(JSON.stringify(rows, null, 2));
-  else print(rows);
-}
+const { values } = parseArgs({
+  allowPositionals: true,
+  options: {
+    json: { type: "boolean", default: false },
+    seeds: { type: "string", default: "untouched" },
+    shops: { type: "string", default: "500" },
+  },
+});
+const rows = benchNextStep(values.seeds as SeedSet, Number(values.shops));
+if (values.json) console.log(JSON.stringify(rows, null, 2));
+else print(rows);

@@ -2,6 +2,7 @@
 import { bench as clearance } from "./clearance";
 import { bench as cycle } from "./cycle";
 import { bench as film } from "./film";
+import { bench as nextStep } from "./next-step/speed";
 import { bench as quantity } from "./quantity";
 
 /** One thing that was timed, in seconds. */
@@ -17,7 +18,7 @@ const asJson = process.argv.includes("--json");
 if (subject === "next-step") {
   await import("./next-step/index");
 } else {
-  report([...quantity(), ...clearance(), ...film(), ...cycle()]);
+  report([...quantity(), ...clearance(), ...film(), ...cycle(), ...nextStep()]);
 }
 
 function report(timed: Timed[]): void {

@@ -122,7 +122,7 @@ function backInside({ history, current, margins }: Choosing): number[] {
 function sortByMargin(targets: readonly number[], { history, margins }: Choosing) {
   const allowed: number[] = [];
   const refused: Said[] = [];
-  for (const target of targets) {
+  for (const target of targets.map(toPicometre)) {
     const why = target > 0 ? marginAt(target, history, margins) : null;
     if (why) refused.push(why);
     else if (target > 0) allowed.push(target);

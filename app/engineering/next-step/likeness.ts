@@ -17,11 +17,12 @@ const oldestBuilds = 30;
 
 /** Weighs every build as evidence about the clearance on the oil and coating of the last one. */
 export function weighBuilds(builds: readonly JudgedBuild[], fit: FitOfHistory): WeighedBuild[] {
-  const present = builds.at(-1);
+  // A build whose oil nobody wrote down is taken to have run on the one before it, until somebody does.
+  const present = builds.findLast(({ iteration }) => iteration.oil !== null)?.iteration.oil ?? null;
   return builds.map((build, index) => {
     const age = builds.length - 1 - index;
     const { oil, events } = build.iteration;
-    const sameOil = isSameOil(oil, present?.iteration.oil ?? null);
+    const sameOil = age === 0 || isSameOil(oil, present);
     const sameCoating = coatingOf(build.iteration, fit) === coatingOf({}, fit);
     const weighed = (weight: number, why: string | null): WeighedBuild => ({
       ...build,

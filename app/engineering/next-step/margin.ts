@@ -11,6 +11,9 @@ export interface Margins {
   rules: CompleteRules;
 }
 
+/** Lengths are kept to the picometre; what differs by less is the same. */
+const picometre = 1e-12;
+
 /** The fourth guard: why a target may not be gone to; null where it may. */
 export function marginAt(
   target: number,
@@ -18,8 +21,8 @@ export function marginAt(
   { bracket, leastStep, rules }: Margins,
 ): Said | null {
   const { least, most } = fit.hardLimits ?? { least: 0, most: Number.POSITIVE_INFINITY };
-  if (target < least - 1e-9) return { code: "hard-limit-least", values: { target, least } };
-  if (target > most + 1e-9) return { code: "hard-limit-most", values: { target, most } };
+  if (target < least - picometre) return { code: "hard-limit-least", values: { target, least } };
+  if (target > most + picometre) return { code: "hard-limit-most", values: { target, most } };
   if (fit.temperatureChange) {
     const { hot, cold } = fit.temperatureChange;
     const tightest = target + Math.min(hot, cold);

@@ -14,7 +14,7 @@ export function likelyLimit(belief: Belief, situation: Situation, wearSeen: bool
   const { limits } = belief;
   const marginal = limits.map((_, i) => sumOver(belief, (j) => belief.weights[j * limits.length + i]!));
   const spacing = (limits[1]! - limits[0]!) * micron;
-  const at = (share: number) => quantile(limits, marginal, share) * micron;
+  const at = (share: number) => quantile(limits, marginal, share, spacing / micron) * micron;
   let slope = 0;
   let baseRate = 0;
   const bests: { value: number; weight: number }[] = [];
@@ -39,6 +39,7 @@ export function likelyLimit(belief: Belief, situation: Situation, wearSeen: bool
         bests.map(({ value }) => value),
         bests.map(({ weight }) => weight),
         0.5,
+        0,
       ) * micron,
   };
 }
@@ -62,14 +63,18 @@ function sumOver({ slopes }: Belief, of: (slope: number) => number): number {
   return slopes.reduce((sum, _, j) => sum + of(j), 0);
 }
 
-/** The value below which a share of the weight lies, between neighbouring values. */
-function quantile(values: readonly number[], weights: readonly number[], share: number): number {
+/** The value below which a share of the weight lies; each weight is spread evenly over `width` around its value. */
+function quantile(
+  values: readonly number[],
+  weights: readonly number[],
+  share: number,
+  width: number,
+): number {
   let passed = 0;
   for (let i = 0; i < values.length; i++) {
     const weight = weights[i]!;
-    if (passed + weight >= share) {
-      const before = values[i - 1] ?? values[i]!;
-      return weight > 0 ? before + ((share - passed) / weight) * (values[i]! - before) : values[i]!;
+    if (passed + weight >= share && weight > 0) {
+      return values[i]! + ((share - passed) / weight - 0.5) * width;
     }
     passed += weight;
   }

@@ -1,5 +1,6 @@
 import { median } from "simple-statistics";
 import type { WeighedBuild } from "./likeness";
+import { expandedUncertainty } from "./readings";
 import type { CompleteRules } from "./rules";
 import type { OilOfRun } from "./types";
 import type { Verdict } from "./verdict";
@@ -45,11 +46,9 @@ export function uncertaintyAtTarget(builds: readonly WeighedBuild[]): number {
   return lastUncertainty(last) / (repeated ? Math.SQRT2 : 1);
 }
 
-/** Expanded uncertainty of one clearance in a build, m: the middle one of its positions. */
-export function lastUncertainty({ positions }: WeighedBuild): number {
-  return positions.length > 0
-    ? 2 * median(positions.map(({ standardUncertainty }) => standardUncertainty))
-    : 0;
+/** Expanded uncertainty of one clearance in a build as it was stated, m: the middle one of its positions. */
+export function lastUncertainty({ iteration: { positions } }: WeighedBuild): number {
+  return positions.length > 0 ? median(positions.map(expandedUncertainty)) : 0;
 }
 
 /** Targets that differ by less than nobody can type. */

@@ -1,5 +1,5 @@
 import { max, mean, median, min } from "simple-statistics";
-import type { Readings } from "./readings";
+import { type Readings, readingDeviation } from "./readings";
 import type { CompleteRules } from "./rules";
 import type { Iteration } from "./types";
 import type { Said } from "./words";
@@ -45,7 +45,7 @@ export function faultOf(
   if (graded * 2 < positions.length)
     return { code: "not-graded", values: { build, graded, positions: positions.length } };
 
-  const uncertainty = median(readings.positions.map(({ standardUncertainty }) => standardUncertainty));
+  const uncertainty = readingDeviation(readings);
   // Beyond three standard deviations of their mean the gauges disagree with themselves: a zero has moved.
   const leastMean = (-3 * Math.SQRT2 * uncertainty) / Math.sqrt(wears.length);
   if (mean(wears) < leastMean) return { code: "gauges-moved", values: { build, wear: mean(wears) } };

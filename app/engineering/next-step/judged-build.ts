@@ -2,6 +2,7 @@ import { mean } from "simple-statistics";
 import { coatingOf } from "./coating";
 import { causeElsewhere } from "./damage";
 import { faultOf } from "./fault";
+import { gaugeNoise } from "./gauge-noise";
 import { type Readings, sortReadings, type UsablePosition } from "./readings";
 import type { CompleteRules } from "./rules";
 import type { FitOfHistory, History, Iteration } from "./types";
@@ -39,8 +40,9 @@ const overloads = ["over-rev", "detonation"];
 export function judgeBuilds({ fit, iterations }: History, rules: CompleteRules): JudgedBuild[] {
   const expected = fit.positions ?? Math.max(1, ...iterations.map(({ positions }) => positions.length));
   const firstOnCoating = firstRunOnCoating(fit, iterations);
+  const noise = gaugeNoise(iterations);
   return iterations.map((iteration, index) => {
-    const readings = sortReadings(iteration, rules);
+    const readings = sortReadings(iteration, rules, noise);
     const clearances = readings.positions.flatMap(({ clearance }) => (clearance === null ? [] : [clearance]));
     const ofClearance = readings.positions.filter((position) => causeElsewhere(position) === null);
     const distressed = ofClearance.filter(

@@ -4,7 +4,7 @@ import { judgeCause } from "./cause";
 import { cautionsOf } from "./cautions";
 import { checkHistory } from "./check-history";
 import { type Choosing, chooseStep } from "./choose-step";
-import { judgeData, lastUncertainty, uncertaintyAtTarget } from "./data";
+import { judgeData, uncertaintyAtTarget } from "./data";
 import { judgeDetriment } from "./detriment";
 import { evidenceOf } from "./evidence";
 import { isClean, isDistressed, judgeBuilds } from "./judged-build";
@@ -15,6 +15,7 @@ import { oilNext, oilWasChanged } from "./one-at-a-time";
 import { openUp } from "./open-up";
 import { cannotSee, wouldChange } from "./outlook-words";
 import { believe } from "./posterior";
+import { readingDeviation, usualScatter } from "./readings";
 import { type CompleteRules, completeRules, tenth } from "./rules";
 import { buildScatter, signsOf } from "./signs";
 import type { Situation } from "./situation";
@@ -106,20 +107,20 @@ function decide(builds: readonly WeighedBuild[], choosing: Choosing): Decision {
 function choosingOf(history: History, builds: readonly WeighedBuild[], rules: CompleteRules): Choosing {
   const last = builds.at(-1);
   const scatter = buildScatter(builds);
-  const uncertainty = last ? lastUncertainty(last) : 0;
+  const reading = last && last.positions.length > 0 ? readingDeviation(last) : usualScatter;
   const hours = builds.flatMap(({ iteration }) => (iteration.hours ? [iteration.hours] : []));
   const limits = history.fit.hardLimits;
   const situation: Situation = {
     current: (last?.iteration.target ?? rules.usual) / micron,
     positions: Math.max(1, last?.positions.length ?? history.fit.positions ?? 1),
     scatter: scatter / micron,
-    wearUncertainty: ((uncertainty / 2) * Math.SQRT2) / micron,
+    wearUncertainty: (Math.SQRT2 * reading) / micron,
     hours: hours.length > 0 ? hours.reduce((sum, one) => sum + one, 0) / hours.length : rules.leastHours,
     largestStep: rules.largestStep / micron,
     hardLeast: (limits?.least ?? 0) / micron,
     hardMost: (limits?.most ?? Number.POSITIVE_INFINITY) / micron,
   };
-  const twiceRead = uncertainty / 2 / Math.SQRT2;
+  const twiceRead = reading / Math.SQRT2;
   const known = (scatter * twiceRead) / Math.hypot(scatter, twiceRead);
   const deviation = Math.hypot(known / micron, 0.4);
   return {

@@ -15,7 +15,7 @@ export interface UsablePosition
   clearance: number | null;
   /** Growth of the clearance; null where a reading is missing or was left out. */
   wear: number | null;
-  /** Standard uncertainty of one clearance. */
+  /** Standard uncertainty of one clearance: as stated, or as readings are seen to scatter where that is more. */
   standardUncertainty: number;
 }
 
@@ -34,6 +34,11 @@ export interface Readings {
   leftOut: LeftOut[];
 }
 
+/** The middle standard uncertainty of one clearance in a build, m. */
+export function readingDeviation({ positions }: Pick<Readings, "positions">): number {
+  return median(positions.map(({ standardUncertainty }) => standardUncertainty));
+}
+
 /** Expanded uncertainty of one clearance of a position, m: as given, or the usual one. */
 export function expandedUncertainty({ uncertainty }: PositionOfBuild): number {
   return uncertainty && uncertainty > 0 && Number.isFinite(uncertainty) ? uncertainty : usualUncertainty;
@@ -42,12 +47,14 @@ export function expandedUncertainty({ uncertainty }: PositionOfBuild): number {
 /**
  * The readings of a build, with those left out that cannot be what was there: a clearance far from its target and from
  * the others, a teardown far from its assembly, wear that is negative beyond what the gauges can err.
+ * @param noise how much readings are seen to scatter, 1 standard deviation, m
  */
-export function sortReadings(iteration: Iteration, { largestStep }: CompleteRules): Readings {
+export function sortReadings(iteration: Iteration, { largestStep }: CompleteRules, noise: number): Readings {
   const leftOut: LeftOut[] = [];
   const centre = centreOf(iteration, 3 * largestStep);
   const positions = iteration.positions.map((position): UsablePosition => {
-    const standardUncertainty = expandedUncertainty(position) / 2;
+    const stated = expandedUncertainty(position) / 2;
+    const standardUncertainty = Math.min(Math.max(stated, noise), 3 * stated);
     const farOff = Math.max(2 * largestStep, 5 * Math.hypot(standardUncertainty, usualScatter));
     const leave = (stage: LeftOut["stage"], code: LeftOut["code"], value: number, expected: number) => {
       leftOut.push({ position: position.position, stage, code, value, likely: likelySlip(value / expected) });

@@ -13,7 +13,7 @@ export interface WeighedBuild extends JudgedBuild {
 /** What unlike and old evidence still counts (no source; set so that a few builds on the present oil outweigh it). */
 const share = { otherOil: 0.25, fuelInOil: 0.5, older: 0.5 } as const;
 const recentBuilds = 12;
-const oldestBuilds = 30;
+const oldestBuilds = 20;
 
 /** Weighs every build as evidence about the clearance on the oil and coating of the last one. */
 export function weighBuilds(builds: readonly JudgedBuild[], fit: FitOfHistory): WeighedBuild[] {

@@ -8,6 +8,11 @@ export function clearanceText(length: number, units: Units): string {
   return `${format(length, "in", 5).replace(/0$/, "")} in`;
 }
 
+/** A clearance that is only believed, to a tenth or a micron: "0.0016 in"; "41 µm". m in. */
+export function roughlyText(length: number, units: Units): string {
+  return units === "metric" ? formatWithUnit(length, "um", 0) : formatWithUnit(length, "in", 4);
+}
+
 /** A step or an uncertainty, without its sign: "2 tenths (0.0002 in)"; "5.1 µm". m in. */
 export function stepText(length: number, units: Units): string {
   const size = Math.abs(length);

@@ -1,5 +1,5 @@
 import { inWords } from "../trade/condition";
-import { chanceText, clearanceText, rateText, stepText, temperatureText } from "./lengths";
+import { chanceText, clearanceText, rateText, roughlyText, stepText, temperatureText } from "./lengths";
 import type { Statement, Units } from "./types";
 
 /** The values of a thing to say, each in the words of its kind. */
@@ -7,6 +7,8 @@ interface Values {
   text: (key: string) => string;
   number: (key: string, decimals?: number) => string;
   clearance: (key: string) => string;
+  /** A clearance that is only believed: to a tenth, or to a micron. */
+  roughly: (key: string) => string;
   step: (key: string) => string;
   rate: (key: string) => string;
   temperature: (key: string) => string;
@@ -83,9 +85,9 @@ const sentences = {
 
   // The step.
   "limit-band": (v) =>
-    `${v.text("share")} that the limit lies between ${v.clearance("from")} and ${v.clearance("to")}.`,
+    `${v.text("share")} that the limit lies between ${v.roughly("from")} and ${v.roughly("to")}.`,
   "clean-builds": (v) =>
-    `${v.number("count")} of the builds on this oil came down clean, the closest at ${v.clearance("closest")}.`,
+    `Builds that came down clean on this oil: ${v.number("count")}, the closest at ${v.clearance("closest")}.`,
   "full-step": (v) =>
     `The limit is far enough for a whole step of ${v.step("step")}; chance of grade 3 or worse ${v.chance("distress")}.`,
   "smaller-step": (v) =>
@@ -99,7 +101,7 @@ const sentences = {
   "bracket-narrow": (v) =>
     `${v.clearance("good")} came down clean and ${v.clearance("bad")} did not; what lies between is less than can be measured and built (${v.step("least")} either way).`,
   "step-not-worth-it": (v) =>
-    `Another step is expected to gain less than it costs: staying ${v.number("staying", 1)}, moving ${v.number("moving", 1)}, counted in rebuilds.`,
+    `Another step is expected to gain less than it costs, with failure weighed heavily: staying ${v.number("staying", 1)}, moving ${v.number("moving", 1)}, counted in rebuilds.`,
   "oil-next": (v) =>
     `This clearance has run clean ${v.number("runs")} times on ${v.text("oil")}. The next change, if any, may be one grade thinner oil at this same clearance; the limit then has to be found anew.`,
 
@@ -138,9 +140,9 @@ const sentences = {
   "oil-changed-too": (v) =>
     `The oil changed in build ${v.number("build")} as well. Going back to ${v.text("from")} at this clearance is the other way; not both at once.`,
   "unlike-evidence": (v) =>
-    `${v.number("count")} of ${v.number("of")} builds count less or not at all (other oil or coating, debris, poor readings, or old).`,
+    `Builds that count less or not at all: ${v.number("count")} of ${v.number("of")} (other oil or coating, debris, poor readings, or old).`,
   "little-evidence": (v) =>
-    `Only ${v.number("count")} builds count in full; the answer leans on what is usual.`,
+    `Builds that count in full: ${v.number("count")}; the answer leans on what is usual.`,
 } as const satisfies Record<string, (values: Values) => string>;
 
 export type Code = keyof typeof sentences;
@@ -158,6 +160,7 @@ export function inSentence({ code, values }: Said, units: Units): Statement {
     text: (key) => String(values[key] ?? ""),
     number: (key, decimals = 0) => numeric(key).toFixed(decimals),
     clearance: (key) => clearanceText(numeric(key), units),
+    roughly: (key) => roughlyText(numeric(key), units),
     step: (key) => stepText(numeric(key), units),
     rate: (key) => rateText(numeric(key), units),
     temperature: (key) => temperatureText(numeric(key), units),
